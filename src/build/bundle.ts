@@ -1,0 +1,91 @@
+/** Makes dist/: the library as modules with types, the command line as one file, and the schemas. Run by
+ *  `npm run build`, after the generator. */
+
+import { chmodSync, copyFileSync, existsSync, mkdirSync, readdirSync, rmSync } from 'node:fs';
+import { join } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import { build } from 'esbuild';
+import ts from 'typescript';
+
+export interface BundleOptions {
+  /** Folder that holds src/ and tsconfig.json. */
+  root: string;
+  /** Folder to make anew. */
+  out: string;
+}
+
+export async function bundle({ root, out }: BundleOptions): Promise<void> {
+  rmSync(out, { recursive: true, force: true });
+  emitLibrary(root, out);
+  copyGenerated(root, out);
+  await bundleCommandLine(root, out);
+}
+
+/** The modules that src/index.ts reaches, each with its types: a user's bundler drops what is not used. */
+function emitLibrary(root: string, out: string): void {
+  const config = ts.readConfigFile(join(root, 'tsconfig.json'), ts.sys.readFile);
+  const { options } = ts.parseJsonConfigFileContent(config.config, ts.sys, root);
+  const program = ts.createProgram([join(root, 'src', 'index.ts')], {
+    ...options,
+    noEmit: false,
+    declaration: true,
+    rootDir: join(root, 'src'),
+    outDir: out,
+  });
+  const { diagnostics } = program.emit();
+  const errors = [...ts.getPreEmitDiagnostics(program), ...diagnostics];
+  if (errors.length > 0) {
+    throw new Error(
+      ts.formatDiagnostics(errors, {
+        getCanonicalFileName: (name) => name,
+        getCurrentDirectory: () => root,
+        getNewLine: () => '\n',
+      }),
+    );
+  }
+}
+
+/** What the compiler does not emit: the validator, which is JavaScript already, and the schemas. */
+function copyGenerated(root: string, out: string): void {
+  const generated = join(root, 'src', 'generated');
+  const copy = (file: string, folder: string): void => {
+    mkdirSync(join(out, folder), { recursive: true });
+    copyFileSync(join(generated, file), join(out, folder, file));
+  };
+  for (const file of readdirSync(generated)) {
+    if (file.endsWith('.js') || file.endsWith('.d.ts')) copy(file, 'generated');
+    if (file.endsWith('.schema.json')) copy(file, 'schema');
+  }
+}
+
+/** One file, packages included: a run then opens one module instead of some hundred. */
+async function bundleCommandLine(root: string, out: string): Promise<void> {
+  const entry = join(root, 'src', 'cli', 'main.ts');
+  if (!existsSync(entry)) throw new Error('src/cli/main.ts is missing.');
+  const outfile = join(out, 'cli', 'main.js');
+  await build({
+    entryPoints: [entry],
+    outfile,
+    bundle: true,
+    platform: 'node',
+    target: 'node20',
+    format: 'esm',
+    minifySyntax: true,
+    legalComments: 'eof',
+    banner: {
+      // Packages in CommonJS call require for what Node itself brings, and a module has none.
+      js: [
+        '#!/usr/bin/env node',
+        "import { createRequire as requireFrom } from 'node:module';",
+        'const require = requireFrom(import.meta.url);',
+      ].join('\n'),
+    },
+    logLevel: 'warning',
+  });
+  chmodSync(outfile, 0o755);
+}
+
+if (process.argv[1] === fileURLToPath(import.meta.url)) {
+  const root = fileURLToPath(new URL('../../', import.meta.url));
+  await bundle({ root, out: join(root, 'dist') });
+}

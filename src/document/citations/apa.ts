@@ -1,0 +1,2 @@
+import type { Reference } from '../../spec/study.ts';
+export const apaEntry = (r: Reference) => r.id;

@@ -1,0 +1,1 @@
+export const marginPlot = (_d: object) => '<svg/>';

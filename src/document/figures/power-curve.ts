@@ -1,0 +1,1 @@
+export const powerCurve = (_d: object) => '<svg/>';

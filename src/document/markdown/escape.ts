@@ -1,0 +1,1 @@
+export const escapeMarkdown = (t: string) => t;

@@ -1,0 +1,1 @@
+export const toHtml = (t: string, _f: ReadonlyMap<string, string>) => t;

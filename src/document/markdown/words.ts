@@ -1,0 +1,1 @@
+export const countWords = (t: string) => t.split(/\s+/).length;

@@ -1,0 +1,1 @@
+export const renderPage = (p: { title: string; kind: string; bodyHtml: string }) => p.bodyHtml;

@@ -1,0 +1,97 @@
+/** Templates → Markdown. Templates hold the prose and say which sentences may go; helpers lay out paragraphs and
+ *  tables, count, and cite. No template computes or formats a number. */
+
+import type Handlebars from 'handlebars';
+import runtime from 'handlebars/runtime.js';
+import { templates as builtIn } from '../generated/templates.ts';
+import type { CitationLog } from './citations/citations.ts';
+import { markdownTable, type Table } from './table.ts';
+
+/** Precompiled templates by path below templates/, such as `parts/losses`. */
+export type TemplateSet = Readonly<Record<string, object>>;
+
+/** A sentence a page holds, as its template declares it. */
+export interface Sentence {
+  id: string;
+  /** Place in the order in which sentences may be dropped, the lowest first; null when it must stay. */
+  drop: number | null;
+  /** Reporting items the sentence answers, such as C10. */
+  reports: string[];
+}
+
+export interface Rendering {
+  markdown: string;
+  sentences: Sentence[];
+}
+
+export interface RenderRequest {
+  /** Path of the document template: `documents/ethics`. */
+  template: string;
+  view: object;
+  citations: CitationLog;
+  /** Ids of sentences left out. */
+  dropped: ReadonlySet<string>;
+  /** A user's own templates, which replace ours path by path. */
+  overrides: TemplateSet;
+}
+
+export function renderTemplate(request: RenderRequest): Rendering {
+  const { template, view, citations, dropped, overrides } = request;
+  const sentences: Sentence[] = [];
+  const handlebars = (runtime as unknown as typeof Handlebars).create();
+  const all = { ...builtIn, ...overrides };
+  for (const [path, compiled] of Object.entries(all)) {
+    handlebars.registerPartial(path, handlebars.template(compiled as TemplateSpecification));
+  }
+  handlebars.registerHelper({
+    sentence(this: unknown, id: string, options: Handlebars.HelperOptions) {
+      const { drop, reports } = options.hash as { drop?: number; reports?: string };
+      sentences.push({ id, drop: drop ?? null, reports: reports?.split(' ') ?? [] });
+      return dropped.has(id) ? '' : `${oneLine(options.fn(this))} `;
+    },
+    paragraph(this: unknown, options: Handlebars.HelperOptions) {
+      const text = oneLine(options.fn(this));
+      return text === '' ? '' : `\n${text}\n\n`;
+    },
+    table: (table: Table) => `\n${markdownTable(table)}\n`,
+    count: (number: number, singular: string, plural: string) =>
+      `${inWords(number)} ${number === 1 ? singular : plural}`,
+    cite: (keys: string | string[], form?: unknown) =>
+      citations.cite(Array.isArray(keys) ? keys : [keys], citationForm(form)),
+    citations: () => citations.list().length > 0,
+    references: () =>
+      citations
+        .list()
+        .map((entry) => `${entry}\n`)
+        .join('\n'),
+  });
+  const render = handlebars.partials[template] as Handlebars.TemplateDelegate | undefined;
+  if (render === undefined) throw new Error(`no template ${template}`);
+  return { markdown: tidy(render(view)), sentences };
+}
+
+type TemplateSpecification = Parameters<typeof Handlebars.template>[0];
+
+/** ` (Cohen, 1988)` after a phrase; `Cohen, 1988` inside a parenthesis of the template; `Cohen (1988)` in a sentence. */
+function citationForm(form: unknown): 'parenthetical' | 'bare' | 'narrative' {
+  return form === 'bare' || form === 'narrative' ? form : 'parenthetical';
+}
+
+/** Templates wrap where they like: white space inside a sentence is one space. */
+function oneLine(text: string): string {
+  return text.replace(/\s+/g, ' ').trim();
+}
+
+/** At most one blank line, one line feed at the end. */
+function tidy(markdown: string): string {
+  return `${markdown
+    .replace(/[ \t]+$/gm, '')
+    .replace(/\n{3,}/g, '\n\n')
+    .trim()}\n`;
+}
+
+const WORDS = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten'];
+
+function inWords(number: number): string {
+  return WORDS[number] ?? String(number);
+}

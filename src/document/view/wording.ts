@@ -1,0 +1,104 @@
+/** How the pages word values, units and grounds: one place, one choice. */
+
+import type { Equivalent } from '../../methods/method.ts';
+import type { Basis, Quantity, Role } from '../../spec/study.ts';
+import { formatExact, formatProbability, formatSignificant } from '../numbers.ts';
+
+const BASES: Record<Basis, string> = {
+  'smallest-effect-of-interest': 'the smallest effect of interest',
+  'published-estimate': 'a published estimate',
+  'meta-analysis': 'the estimate of a meta-analysis',
+  'pilot-data': 'an estimate from pilot data',
+  'routine-data': 'taken from routine data',
+  'expert-judgement': 'a judgement of experts',
+  convention: 'a convention',
+};
+
+export function basisText(basis: Basis | null): string | null {
+  return basis === null ? null : BASES[basis];
+}
+
+const ROLES: Record<Role, string> = {
+  primary: 'Primary',
+  'key-secondary': 'Key secondary',
+  secondary: 'Secondary',
+  exploratory: 'Exploratory',
+};
+
+export function roleTitle(role: Role): string {
+  return ROLES[role];
+}
+
+/** Digits of a number that was computed and is read, not typed. */
+const COMPUTED_DIGITS = 3;
+
+/** A number as the author typed it. Numbers without a unit are written without a leading zero. */
+export function typedNumber(value: number, unit: string): string {
+  return pure(formatExact(value), unit);
+}
+
+/** A computed number for reading. */
+export function computedNumber(value: number, unit: string): string {
+  return pure(formatSignificant(value, COMPUTED_DIGITS), unit);
+}
+
+function pure(text: string, unit: string): string {
+  return unit === '' ? text.replace(/^(−?)0\./, '$1.') : text;
+}
+
+/** A target power or a floor: two decimals at least, all that were given. */
+export function powerTarget(value: number): string {
+  const exact = formatProbability(value);
+  return /^\.\d$/.test(exact) ? `${exact}0` : exact;
+}
+
+/** The unit behind a quantity: that of the outcome where the schema says so. */
+export function unitText(unit: string, outcomeUnit: string): string {
+  if (unit === '') return '';
+  return unit.replace('outcome', outcomeUnit).replace('/', ' per unit of the ');
+}
+
+export function withUnit(text: string, unit: string): string {
+  return unit === '' ? text : `${text} ${unit}`;
+}
+
+/** 'partial R² of .06', with its unit. */
+export function stated(quantity: Quantity, outcomeUnit: string, value = quantity.value): string {
+  const text = withUnit(typedNumber(value, quantity.unit), unitText(quantity.unit, outcomeUnit));
+  return `${quantity.title} of ${text}`;
+}
+
+export function rangeText(quantity: Quantity): string | null {
+  const { low, high, unit } = quantity;
+  if (low !== null && high !== null) return `${typedNumber(low, unit)} to ${typedNumber(high, unit)}`;
+  if (low !== null) return `from ${typedNumber(low, unit)}`;
+  if (high !== null) return `up to ${typedNumber(high, unit)}`;
+  return null;
+}
+
+export function equivalentText({ meaning, value, unit }: Equivalent, outcomeUnit: string): string {
+  return `${meaning} of ${withUnit(computedNumber(value, unit), unitText(unit, outcomeUnit))}`;
+}
+
+/** The stated form first, the others in parentheses behind it. */
+export function effectText(
+  equivalents: readonly Equivalent[],
+  leadingKey: string | null,
+  outcomeUnit: string,
+): string {
+  const leading = equivalents.find(({ key }) => key === leadingKey) ?? equivalents[0];
+  if (leading === undefined) return '';
+  const others = equivalents.filter((one) => one !== leading).map((one) => equivalentText(one, outcomeUnit));
+  const text = equivalentText(leading, outcomeUnit);
+  return others.length === 0 ? text : `${text} (${others.join('; ')})`;
+}
+
+/** The author's own sentence, with a full stop if it ends without one. */
+export function sentence(text: string): string {
+  return /[.!?…]["’”)]*\s*$/.test(text) ? text.trim() : `${text.trim()}.`;
+}
+
+export function list(items: readonly string[]): string {
+  if (items.length < 2) return items.join('');
+  return `${items.slice(0, -1).join(', ')} and ${items.at(-1)}`;
+}

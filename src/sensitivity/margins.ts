@@ -1,0 +1,94 @@
+/** How far each assumption can slip, alone, until the planned study falls below a floor, in its own unit. */
+
+import { findRoot } from '../numeric/solve/root.ts';
+import type { AimPlan, StudyPlan } from '../plan/plan.ts';
+import { meets } from '../plan/solve.ts';
+import type { Quantity } from '../spec/study.ts';
+import { candidates } from './ranges.ts';
+import { requiredOrNull } from './required-table.ts';
+import { achievedWith } from './scenario.ts';
+
+export interface Limit {
+  floor: number;
+  /** The value at which the floor is met exactly; null when no admissible value breaks it, or the plan is
+   *  already below it. */
+  value: number | null;
+  /** Why there is no value. */
+  reason: 'never-breaks' | 'already-below' | null;
+}
+
+export interface Margin {
+  quantity: Quantity;
+  stage: string | null;
+  limits: Limit[];
+}
+
+/** Floors of a power: .80 and .10 below the target. Of a width: a quarter and a half wider than wanted. */
+export function floorsOf(plan: AimPlan): number[] {
+  const target = plan.target ?? plan.planned.achieved;
+  if (target === null) return [];
+  if (plan.method.achieves === 'width') return [target * 1.25, target * 1.5];
+  const below = Number((target - 0.1).toPrecision(12));
+  return [...new Set([0.8, below])].filter((floor) => floor > plan.aim.criteria.alpha).sort((a, b) => b - a);
+}
+
+export function margins(plan: AimPlan, study: StudyPlan): Margin[] {
+  if (plan.effect === null) return [];
+  const floors = floorsOf(plan);
+  return candidates(plan, study).map(({ quantity, stage }) => ({
+    quantity,
+    stage,
+    limits: floors.map((floor) =>
+      stage === null ? quantityLimit(plan, quantity, floor) : lossLimit(plan, study, quantity, floor),
+    ),
+  }));
+}
+
+function quantityLimit(plan: AimPlan, quantity: Quantity, floor: number): Limit {
+  const { n } = plan.planned;
+  const achieved = plan.planned.achieved;
+  if (achieved === null || !meets(plan.method, achieved, floor))
+    return { floor, value: null, reason: 'already-below' };
+  const excess = (value: number) => {
+    const at = achievedWith(plan, n, { [quantity.key]: value });
+    return at === null ? null : plan.method.achieves === 'power' ? at - floor : floor - at;
+  };
+  for (const end of endsOf(quantity)) {
+    const broken = firstBroken(quantity.value, end, excess);
+    if (broken === null) continue;
+    return { floor, value: findRoot((x) => excess(x) ?? 0, quantity.value, broken), reason: null };
+  }
+  return { floor, value: null, reason: 'never-breaks' };
+}
+
+/** Both ends of what the key allows; open ends are approached to one part in 10⁹. */
+function endsOf({ value, range }: Quantity): number[] {
+  const lower = Number.isFinite(range.minimum) ? range.minimum : value - 1000 * Math.max(1, Math.abs(value));
+  const upper = Number.isFinite(range.maximum) ? range.maximum : value + 1000 * Math.max(1, Math.abs(value));
+  return [lower + (value - lower) * 1e-9, upper - (upper - value) * 1e-9];
+}
+
+/** Walk from the planned value towards `end` in steps that shrink geometrically near it; the first place where the
+ *  floor is broken, or null when it holds all the way. */
+function firstBroken(from: number, end: number, excess: (value: number) => number | null): number | null {
+  for (let step = 1; step <= 60; step += 1) {
+    const x = end + (from - end) * 0.7 ** step;
+    const at = excess(x);
+    if (at === null) return null;
+    if (at < 0) return x;
+  }
+  return null;
+}
+
+/** People come whole: the largest proportion that leaves the number needed for the floor. */
+function lossLimit(plan: AimPlan, study: StudyPlan, quantity: Quantity, floor: number): Limit {
+  if (plan.effect === null) return { floor, value: null, reason: 'already-below' };
+  const needed = requiredOrNull(plan, plan.effect, floor);
+  const kept = study.study.sample.losses
+    .filter((loss) => loss.proportion.path !== quantity.path)
+    .reduce((product, loss) => product * (1 - loss.proportion.value), study.enrol);
+  if (needed === null || needed > kept * (1 - quantity.value) + 1e-9) {
+    return { floor, value: null, reason: 'already-below' };
+  }
+  return { floor, value: 1 - needed / kept, reason: null };
+}

@@ -1,0 +1,31 @@
+/** Paths into a spec as people read them: `aims[0].inputs.added`. */
+
+export type Segments = readonly (string | number)[];
+
+const PLAIN_KEY = /^[A-Za-z_$][\w$-]*$/;
+
+/** `['aims', 0, 'inputs']` → `aims[0].inputs`; a key that is no plain word is quoted in brackets. */
+export function formatPath(segments: Segments): string {
+  let path = '';
+  for (const segment of segments) {
+    if (typeof segment === 'number') path += `[${segment}]`;
+    else if (!PLAIN_KEY.test(segment)) path += `[${escaped(segment)}]`;
+    else path += path === '' ? segment : `.${segment}`;
+  }
+  return path;
+}
+
+/** The path one step up; null above the whole file. */
+export function parentPath(path: string): string | null {
+  if (path === '') return null;
+  const last = /(\[\d+\]|\["(?:[^"\\]|\\.)*"\]|\.?[\w$-]+)$/.exec(path);
+  return last ? path.slice(0, last.index) : '';
+}
+
+/** Quoted, with marks that reorder a line written as escapes. */
+function escaped(key: string): string {
+  return JSON.stringify(key).replace(
+    /[\u007f-\u009f\u200e\u200f\u202a-\u202e\u2066-\u2069\u2028\u2029]/g,
+    (mark) => `\\u${mark.charCodeAt(0).toString(16).padStart(4, '0')}`,
+  );
+}

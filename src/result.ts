@@ -37,7 +37,7 @@ function aimResult(plan: AimPlan, judgements: readonly Judgement[]): AimResult {
     sample_size: { evaluable: own.n, unrounded: plan.unrounded, enrol: plan.enrol },
     power: isTest ? own.achieved : null,
     ...(isTest ? {} : { width: own.achieved }),
-    effect: effectForms(plan, plan.effect),
+    effect: statedEffect(plan),
     detectable_effect: effectForms(plan, own.detectable),
     alpha: aim.criteria.alpha,
     target,
@@ -55,6 +55,14 @@ function yieldResult(plan: AimPlan, { n, achieved, detectable }: Yield): YieldRe
     ...(isTest ? {} : { width: achieved }),
     detectable_effect: effectForms(plan, detectable),
   };
+}
+
+/** The effect in every form, the stated one with the digits of the spec and not as computed back from the others. */
+function statedEffect(plan: AimPlan): Record<string, number> | null {
+  const forms = effectForms(plan, plan.effect);
+  if (forms === null) return null;
+  const stated = Object.entries(forms).map(([key, value]) => [key, plan.aim.quantities[key]?.value ?? value]);
+  return Object.fromEntries(stated);
 }
 
 function effectForms(plan: AimPlan, effect: number | null): Record<string, number> | null {

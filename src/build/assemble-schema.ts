@@ -4,7 +4,7 @@
 import { isSchema, type JsonSchema, mapSchema, schemaAt, stringsAt } from './json-schema.ts';
 import type { SchemaSources } from './schema-sources.ts';
 
-export const DIALECT = 'https://json-schema.org/draft/2020-12/schema';
+const DIALECT = 'https://json-schema.org/draft/2020-12/schema';
 
 /** Keys of an aim that a fragment describes; the base only names them. */
 const FROM_FRAGMENT = ['inputs', 'criteria', 'find'];

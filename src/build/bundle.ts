@@ -15,14 +15,17 @@ export interface BundleOptions {
 }
 
 export async function bundle({ root, out }: BundleOptions): Promise<void> {
+  const emitLibrary = compileLibrary(root, out);
+  // Only now: sources that do not compile leave the last build as it was.
   rmSync(out, { recursive: true, force: true });
-  emitLibrary(root, out);
+  emitLibrary();
   copyGenerated(root, out);
   await bundleCommandLine(root, out);
 }
 
-/** The modules that src/index.ts reaches, each with its types: a user's bundler drops what is not used. */
-function emitLibrary(root: string, out: string): void {
+/** The modules that src/index.ts reaches, each with its types: a user's bundler drops what is not used.
+ *  Returns what writes them. @throws {Error} lists what does not compile */
+function compileLibrary(root: string, out: string): () => void {
   const config = ts.readConfigFile(join(root, 'tsconfig.json'), ts.sys.readFile);
   const { options } = ts.parseJsonConfigFileContent(config.config, ts.sys, root);
   const program = ts.createProgram([join(root, 'src', 'index.ts')], {
@@ -32,8 +35,7 @@ function emitLibrary(root: string, out: string): void {
     rootDir: join(root, 'src'),
     outDir: out,
   });
-  const { diagnostics } = program.emit();
-  const errors = [...ts.getPreEmitDiagnostics(program), ...diagnostics];
+  const errors = ts.getPreEmitDiagnostics(program);
   if (errors.length > 0) {
     throw new Error(
       ts.formatDiagnostics(errors, {
@@ -43,6 +45,16 @@ function emitLibrary(root: string, out: string): void {
       }),
     );
   }
+  return () => {
+    program.emit(undefined, (file, text) => {
+      ts.sys.writeFile(file, file.endsWith('.d.ts') ? withEndingsOfOutput(text) : text);
+    });
+  };
+}
+
+/** The compiler rewrites the endings of imports in modules and leaves them in declarations. */
+function withEndingsOfOutput(declarations: string): string {
+  return declarations.replace(/(\bfrom |\bimport\()(['"])(\.{1,2}\/[^'"]*)\.ts\2/g, '$1$2$3.js$2');
 }
 
 /** What the compiler does not emit: the validator, which is JavaScript already, and the schemas. */

@@ -54,3 +54,15 @@ export function resolved(schema: JsonSchema, root: JsonSchema): JsonSchema {
   const { $ref: _, ...beside } = schema;
   return { ...resolved(target, root), ...beside };
 }
+
+/** A number, or an object that gives it as `value`. */
+export function isQuantityKind(definition: unknown): boolean {
+  if (!isSchema(definition) || !Array.isArray(definition.type)) return false;
+  const properties = definition.properties;
+  return (
+    definition.type.includes('number') &&
+    definition.type.includes('object') &&
+    isSchema(properties) &&
+    'value' in properties
+  );
+}

@@ -24,12 +24,14 @@ export function readSchemaSources(root: string): SchemaSources {
       throw new Error(`schema/${path}: ${(error as Error).message}`);
     }
   };
-  const names = readdirSync(join(folder, 'methods')).sort();
+  const names = readdirSync(join(folder, 'methods'));
   const named = <T>(ending: string, read: (file: string) => T): Map<string, T> =>
     new Map(
       names
         .filter((name) => name.endsWith(ending))
-        .map((name) => [name.slice(0, -ending.length), read(join('methods', name))]),
+        .map((name) => name.slice(0, -ending.length))
+        .sort()
+        .map((method) => [method, read(join('methods', `${method}${ending}`))]),
     );
   return {
     base: json('spec.json'),

@@ -3,8 +3,7 @@
 import type { EffectFormInput, MethodInputs, PlainInput, QuantityInput } from '../spec/method-inputs.ts';
 import type { Find, Range } from '../spec/study.ts';
 import { GENERATED, literal } from './generated-file.ts';
-import { isSchema, type JsonSchema, resolved, schemaAt, stringsAt } from './json-schema.ts';
-import { isQuantityKind } from './write-types.ts';
+import { isQuantityKind, isSchema, type JsonSchema, resolved, schemaAt, stringsAt } from './json-schema.ts';
 
 export function writeInputs(inputs: Readonly<Record<string, MethodInputs>>): string {
   return [

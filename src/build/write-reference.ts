@@ -1,11 +1,10 @@
 /** schema/README.md: every key of a spec, read from the assembled schema. */
 
 import { allowed, typesOf } from '../spec/allowed.ts';
+import { LIMITS } from '../spec/limits.ts';
 import type { MethodInputs } from '../spec/method-inputs.ts';
-import { LIMITS } from '../spec/read.ts';
 import { listed } from '../spec/shown.ts';
-import { isSchema, type JsonSchema, resolved, schemaAt, stringsAt } from './json-schema.ts';
-import { isQuantityKind } from './write-types.ts';
+import { isQuantityKind, isSchema, type JsonSchema, resolved, schemaAt, stringsAt } from './json-schema.ts';
 
 export function writeReference(spec: JsonSchema, inputs: Readonly<Record<string, MethodInputs>>): string {
   const page = new Page(spec);

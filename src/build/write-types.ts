@@ -2,7 +2,7 @@
 
 import { compile, type JSONSchema } from 'json-schema-to-typescript';
 import { GENERATED } from './generated-file.ts';
-import { isSchema, type JsonSchema, mapSchema, schemaAt } from './json-schema.ts';
+import { isQuantityKind, isSchema, type JsonSchema, mapSchema, schemaAt } from './json-schema.ts';
 
 const OPTIONS = {
   bannerComment: '',
@@ -67,16 +67,4 @@ function plainer(schema: JsonSchema): JsonSchema {
     plainDefinitions[quantity] = { ...shown, title: 'QuantityValue', description };
   }
   return plain;
-}
-
-/** A number, or an object that gives it as `value`. */
-export function isQuantityKind(definition: unknown): boolean {
-  if (!isSchema(definition) || !Array.isArray(definition.type)) return false;
-  const properties = definition.properties;
-  return (
-    definition.type.includes('number') &&
-    definition.type.includes('object') &&
-    isSchema(properties) &&
-    'value' in properties
-  );
 }

@@ -18,6 +18,8 @@ export async function writeValidator(
     strict: true,
     strictRequired: false,
     allowUnionTypes: true,
+    messages: false,
+    inlineRefs: false,
     keywords: annotationsOf(schema),
     code: { source: true, esm: true },
   });
@@ -30,7 +32,7 @@ export async function writeValidator(
     bundle: true,
     format: 'esm',
     target: 'node20',
-    minifySyntax: true,
+    minify: true,
     write: false,
     logLevel: 'warning',
   });

@@ -3,7 +3,7 @@
 import type { Report } from '../report.ts';
 import { formatCount } from './numbers.ts';
 import { achievedText } from './view/achieved.ts';
-import { effectText, roleTitle } from './view/wording.ts';
+import { effectText, roleTitle, unitsOf } from './view/wording.ts';
 
 export interface NumbersTable {
   title: string;
@@ -36,7 +36,7 @@ export function numbersTable({ study, plan }: Report): NumbersTable {
         const forms = effectText(
           aim.calculation.equivalents(detectable),
           aim.aim.effectKeys[0] ?? null,
-          aim.aim.outcome.unit,
+          unitsOf(aim.aim),
         );
         return [`Detectable with ${formatCount(n)} analysed, aim “${aim.aim.id}”: ${forms}.`];
       }),

@@ -75,21 +75,26 @@ export interface Calculation {
   effectAt(values: Values): number;
   /** Power, or width of the interval, with n analysed (n may be a real number) and the given effect. */
   achieved(n: number, effect: number): number;
+  /** A rough number for the target, from an asymptotic formula: where the search begins, never a result. */
+  guess(effect: number, target: number): number;
   /** The arithmetic behind `achieved`, in order; the last step is the achieved value itself. */
   steps(n: number, effect: number): Step[];
   /** The effect in every form the field reports. */
   equivalents(effect: number): Equivalent[];
   /** Whole-number inputs that the steps use by name, in order: `u`, `p`, `sides`, … */
   readonly constants: readonly { variable: string; meaning: string; value: number }[];
-  /** Alternative numbers worth printing beside the result, such as n under the other convention; may be empty. */
-  alternatives(n: number, effect: number, target: number): Alternative[];
+  /** Numbers that other conventions give, worth printing beside the result; may be empty. */
+  alternatives(effect: number, target: number): Alternative[];
 }
 
 export interface Alternative {
   key: string;
   /** A clause for the appendix: 'with predictor values fixed by design'. */
   description: string;
+  /** Number to analyse under it. */
   n: number;
+  /** The arithmetic under it, as in `Calculation.steps`. */
+  steps(n: number): Step[];
 }
 
 export interface Method {
@@ -111,6 +116,8 @@ export interface Method {
   readonly symbols: readonly { symbol: string; meaning: string }[];
   readonly sources: readonly Source[];
   readonly assumptions: readonly Assumption[];
+  /** Whether one evaluation takes so long in R and Python that printed lines check a number rather than search it. */
+  readonly isCostly?: boolean;
   /** Whether what is achieved improves with every further n, or only eventually. */
   readonly rises: 'always' | 'eventually';
   /** Bind one aim. @throws ProblemError when the inputs contradict each other. */

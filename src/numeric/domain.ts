@@ -1,5 +1,5 @@
 /** One check per kind of argument. Every function of numeric/ refuses in the same words:
- *  "tQuantile: p is 1.5; a number above 0 and below 1 is needed". */
+ *  "tQuantile: p is 1.5; a number above 0 and below 1 is needed". NaN fails every check. */
 
 /** The one form of a refusal, for domains that the checks below do not cover. */
 export function refuse(functionName: string, argument: string, value: number, needed: string): never {
@@ -31,7 +31,20 @@ export function requireBetween(
   }
 }
 
-/** Neither end allowed: a probability, whose quantile is sought. */
+/** A value whose support starts at 0, where numbers below `lowest` would lose digits as subnormal doubles do. */
+export function requireZeroOrBetween(
+  functionName: string,
+  argument: string,
+  value: number,
+  lowest: number,
+  highest: number,
+): void {
+  if (!(value === 0 || (value >= lowest && value <= highest))) {
+    refuse(functionName, argument, value, `0 or a number from ${lowest} to ${highest}`);
+  }
+}
+
+/** Neither end allowed: a probability whose quantile is sought. */
 export function requireProbability(functionName: string, argument: string, value: number): void {
   if (!(value > 0 && value < 1)) refuse(functionName, argument, value, 'a number above 0 and below 1');
 }

@@ -6,7 +6,7 @@ import { fail, type Problem, ProblemError } from '../problem.ts';
 import type { Aim, Study } from '../spec/study.ts';
 import { enrolledFor, evaluableFrom, proportionsOf, stageCounts } from './losses.ts';
 import { type AimPlan, drivesSize, type StudyPlan, type Yield } from './plan.ts';
-import { detectableEffect, OutOfReach, requiredNumber } from './solve.ts';
+import { detectableEffect, OutOfReach, realValuedNumber, requiredNumber } from './solve.ts';
 
 interface BoundAim {
   aim: Aim;
@@ -78,7 +78,11 @@ function bindAim(aim: Aim): BoundAim {
       'A sample size can be found only for a stated effect and target.',
     );
   }
-  return { ...bound, required: reached(aim, () => requiredNumber(method, calculation, effect, target)) };
+  const required = reached(aim, () => {
+    const n = requiredNumber(method, calculation, effect, target);
+    return { n, unrounded: realValuedNumber(calculation, n, effect, target) };
+  });
+  return { ...bound, required };
 }
 
 /** Turn what is out of reach into a problem of the aim. */

@@ -15,38 +15,43 @@ export class OutOfReach extends Error {
   }
 }
 
-export interface RequiredNumber {
-  /** Smallest n that meets the target for it and every larger n. */
-  n: number;
-  /** Where a real-valued n would meet the target exactly; equal to `n` when the smallest admissible n suffices. */
-  unrounded: number;
-}
-
 /** Does `achieved` meet the target? Power must reach it, the width of an interval must not exceed it. */
 export function meets(method: Method, achieved: number, target: number): boolean {
   return method.achieves === 'power' ? achieved >= target : achieved <= target;
 }
 
-/** @throws OutOfReach when more than LARGEST_N would be needed. */
+/** Smallest n that meets the target for it and every larger n. The search begins below a guess, so that it costs a few
+ *  evaluations whatever the size. @throws OutOfReach when more than LARGEST_N would be needed. */
 export function requiredNumber(
   method: Method,
   calculation: Calculation,
   effect: number,
   target: number,
-): RequiredNumber {
+): number {
+  const { smallestN } = calculation;
   const holds = (n: number) => meets(method, calculation.achieved(n, effect), target);
-  let n: number;
+  let from = Math.min(LARGEST_N, Math.max(smallestN, Math.floor(calculation.guess(effect, target))));
   try {
-    n = smallestInteger(holds, calculation.smallestN, LARGEST_N, method.rises);
+    while (from > smallestN && holds(from)) from = Math.max(smallestN, Math.floor(from * 0.95) - 1);
+    return smallestInteger(holds, from, LARGEST_N, method.rises);
   } catch (error) {
     if (error instanceof RangeError) {
       throw new OutOfReach(`More than ${LARGEST_N} would have to be analysed; the target cannot be reached.`);
     }
     throw error;
   }
-  if (n === calculation.smallestN) return { n, unrounded: n };
-  const excess = (x: number) => calculation.achieved(x, effect) - target;
-  return { n, unrounded: findRoot(excess, n - 1, n) };
+}
+
+/** Where a real-valued n would meet the target exactly, `n` being the required number; `n` itself when even the
+ *  smallest admissible number meets it. */
+export function realValuedNumber(
+  calculation: Calculation,
+  n: number,
+  effect: number,
+  target: number,
+): number {
+  if (n === calculation.smallestN) return n;
+  return findRoot((x) => calculation.achieved(x, effect) - target, n - 1, n);
 }
 
 /** The smallest effect for which n analysed reach the target power. Solved on a log scale, so that its

@@ -1,3 +1,4 @@
+/// <reference path="./jstat.d.ts" />
 /** Expected power over the stated range of the effect (assurance; O'Hagan, Stevens & Campbell 2005): power averaged
  *  over a triangular distribution that has its mode at the planned value and ends at the stated low and high. */
 

@@ -53,7 +53,11 @@ function quantityLimit(plan: AimPlan, quantity: Quantity, floor: number): Limit 
     const at = achievedWith(plan, n, { [quantity.key]: value });
     return at === null ? null : plan.method.achieves === 'power' ? at - floor : floor - at;
   };
+  const planned = achieved - floor;
   for (const end of endsOf(quantity)) {
+    // Only the way on which things get worse: on the other the computation may have no end.
+    const near = excess(quantity.value + (end - quantity.value) * 1e-3);
+    if (near === null || near >= (plan.method.achieves === 'power' ? planned : -planned)) continue;
     const broken = firstBroken(quantity.value, end, excess);
     if (broken === null) continue;
     return { floor, value: findRoot((x) => excess(x) ?? 0, quantity.value, broken), reason: null };
@@ -61,11 +65,17 @@ function quantityLimit(plan: AimPlan, quantity: Quantity, floor: number): Limit 
   return { floor, value: null, reason: 'never-breaks' };
 }
 
-/** Both ends of what the key allows; open ends are approached to one part in 10⁹. */
+/** A thousand times the planned value stands for "without limit". */
+const FAR = 1000;
+
+/** Where the key's range ends on either side, or zero where that comes first: an effect does not slip through zero.
+ *  Ends are approached to one part in 10⁹. */
 function endsOf({ value, range }: Quantity): number[] {
-  const lower = Number.isFinite(range.minimum) ? range.minimum : value - 1000 * Math.max(1, Math.abs(value));
-  const upper = Number.isFinite(range.maximum) ? range.maximum : value + 1000 * Math.max(1, Math.abs(value));
-  return [lower + (value - lower) * 1e-9, upper - (upper - value) * 1e-9];
+  const lowest = Number.isFinite(range.minimum) ? range.minimum : -FAR * Math.max(1, Math.abs(value));
+  const highest = Number.isFinite(range.maximum) ? range.maximum : FAR * Math.max(1, Math.abs(value));
+  const lower = value > 0 ? Math.max(0, lowest) : lowest;
+  const upper = value < 0 ? Math.min(0, highest) : highest;
+  return [lower, upper].filter((end) => end !== value).map((end) => end + (value - end) * 1e-9);
 }
 
 /** Walk from the planned value towards `end` in steps that shrink geometrically near it; the first place where the

@@ -39,7 +39,7 @@ export function requiredTable(plan: AimPlan, { study }: StudyPlan): RequiredTabl
 /** null where the target is out of reach. */
 export function requiredOrNull(plan: AimPlan, effect: number, target: number): number | null {
   try {
-    return requiredNumber(plan.method, plan.calculation, effect, target).n;
+    return requiredNumber(plan.method, plan.calculation, effect, target);
   } catch (error) {
     if (error instanceof OutOfReach || error instanceof RangeError) return null;
     throw error;

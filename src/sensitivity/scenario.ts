@@ -27,9 +27,14 @@ export function effectWith(plan: AimPlan, changes: Values): number | null {
   }
 }
 
-/** What n analysed achieve with some quantities replaced; null where that is not defined. */
+/** What n analysed achieve with some quantities replaced; null where that is not defined or beyond computation. */
 export function achievedWith(plan: AimPlan, n: number, changes: Values): number | null {
   const effect = effectWith(plan, changes);
   if (effect === null || n < plan.calculation.smallestN) return null;
-  return plan.calculation.achieved(n, effect);
+  try {
+    return plan.calculation.achieved(n, effect);
+  } catch (error) {
+    if (error instanceof RangeError) return null;
+    throw error;
+  }
 }

@@ -26,15 +26,15 @@ export function formMessage(keys: readonly string[], forms: readonly EffectFormI
   if (known.length === 0) return `No effect is stated. ${formList(forms)}`;
   if (begun.length === 0)
     return `Found ${listed(known, 'and')}, which do not belong to one form. ${formList(forms)}`;
-  const completions = begun.map((form) =>
+  const missing = begun.map((form) =>
     listed(
       form.keys.filter((key) => !known.includes(key)),
       'and',
     ),
   );
-  return `Found ${listed(known, 'and')} alone; ${listed(completions, 'or')} must stand beside it. ${formList(forms)}`;
+  return `Found ${listed(known, 'and')}, which is not a whole form: add ${missing.join(', or ')}.`;
 }
 
 function formList(forms: readonly EffectFormInput[]): string {
-  return `Give the effect in one form: ${forms.map(({ title, keys }) => `${title} (${listed(keys, 'and')})`).join('; ')}.`;
+  return `Give the effect in one form. ${forms.map(({ title, keys }) => `${listed(keys, 'and')}: ${title}`).join('; ')}.`;
 }

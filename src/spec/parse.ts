@@ -5,12 +5,12 @@ import type { Spec } from '../generated/spec.ts';
 import type { Problem } from '../problem.ts';
 import { specHash } from './canonical.ts';
 import { findInconsistencies } from './consistency.ts';
+import { LIMITS } from './limits.ts';
 import { normalise } from './normalise.ts';
 import { inFileOrder, locate } from './positions.ts';
 import { read } from './read.ts';
-import { loadReferences, type ReferenceLoader } from './references.ts';
+import { type ReferenceLoader, referencesOf, withReferences } from './references.ts';
 import type { Reference, Study } from './study.ts';
-import { type Group, isGroup } from './tree.ts';
 import { type Finding, validate } from './validate.ts';
 
 export interface ParseOptions {
@@ -34,15 +34,27 @@ export type Located = Problem;
 
 /** Never throws for the sake of the text: what is wrong with it is in `problems`. */
 export function parseSpec(text: string, options: ParseOptions = {}): ParsedSpec {
-  const { tree, positions, problems: unread } = read(text);
+  const { tree: written, positions, problems: unread } = read(text);
+  const { tree, source, areKnown, problems: unloaded } = withReferences(written, options.readReferences);
   const place = (problem: Problem): Located => locate(problem, positions, options.file);
-  const { items, problems: unloaded } =
-    tree === undefined ? { items: [], problems: [] } : loadReferences(tree, options.readReferences);
-  const found =
-    tree === undefined ? [] : [...unloaded, ...validate(tree), ...findInconsistencies(tree, items)];
-  const problems = inFileOrder([...unread, ...withoutConsequences(found)].map(place));
-  const isValid = problems.length === 0 && items !== null && isGroup(tree);
-  return { study: isValid ? studyOf(tree, items) : null, problems, locate: place };
+  const placeInvalid = (problem: Problem): Located =>
+    source !== null && problem.path.startsWith('references[')
+      ? locate({ ...problem, path: problem.path.slice('references'.length) }, source.positions, source.file)
+      : place(problem);
+  const invalid = tree === undefined ? [] : findProblems(tree, areKnown ? referencesOf(tree) : null);
+  const problems = inFileOrder([...unread.map(place), ...invalid.map(placeInvalid), ...unloaded.map(place)]);
+  return {
+    study: problems.length === 0 ? studyOf(tree as Spec) : null,
+    problems: atMost(LIMITS.problems, problems),
+    locate: place,
+  };
+}
+
+function findProblems(tree: unknown, references: readonly Reference[] | null): Problem[] {
+  const invalid = validate(tree);
+  // Lists beyond their limits are reported and not looked into.
+  const isOversized = invalid.some(({ code }) => code === 'too-many');
+  return withoutConsequences([...invalid, ...(isOversized ? [] : findInconsistencies(tree, references))]);
 }
 
 /** A key written wrong is also a key missing: the second is not said. */
@@ -53,8 +65,14 @@ function withoutConsequences(findings: readonly Finding[]): Problem[] {
     .map(({ explains: _, ...problem }) => problem);
 }
 
-function studyOf(tree: Group, references: readonly Reference[]): Study {
-  const resolved = typeof tree.references === 'string' ? { ...tree, references } : tree;
-  // The validator has just said that the tree is a spec.
-  return normalise(resolved as unknown as Spec, references, specHash(resolved));
+/** A file with a thousand faults has one reason, which the first of them show. */
+function atMost(most: number, problems: Problem[]): Problem[] {
+  const next = problems[most];
+  if (!next) return problems;
+  const message = `Not all problems are shown: there are more from here on. Mend the ${most} above first.`;
+  return [...problems.slice(0, most), { ...next, code: 'more-problems', message }];
+}
+
+function studyOf(spec: Spec): Study {
+  return normalise(spec, referencesOf(spec), specHash(spec));
 }

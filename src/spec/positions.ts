@@ -1,31 +1,58 @@
 /** Where each part of a spec stands in its file. */
 
 import type { Position, Problem } from '../problem.ts';
-import { parentPath } from './path.ts';
+import { parsePath, type Segments } from './path.ts';
 
 /** Codes of problems that are about a key and not about its value. */
 const ABOUT_THE_KEY = new Set(['unknown-key', 'effect-form', 'missing-key']);
 
-interface Place {
-  key: number | null;
-  value: number;
-  isCollection: boolean;
+/** One node of the file. Places form a tree of their own, as paths written out would repeat every key above. */
+export class Place {
+  readonly parent: Place | null;
+  readonly segment: string | number;
+  readonly depth: number;
+  /** Offset of the key it stands under; null for an entry of a list and for the whole. */
+  readonly key: number | null;
+  readonly value: number;
+  readonly isCollection: boolean;
+  readonly #children = new Map<string | number, Place>();
+
+  constructor(at: {
+    parent: Place | null;
+    segment: string | number;
+    key: number | null;
+    value: number;
+    isCollection: boolean;
+  }) {
+    this.parent = at.parent;
+    this.segment = at.segment;
+    this.depth = at.parent ? at.parent.depth + 1 : 0;
+    this.key = at.key;
+    this.value = at.value;
+    this.isCollection = at.isCollection;
+    // Where a key is given twice, the first stays: later stages see the first value.
+    if (at.parent && !at.parent.#children.has(at.segment)) at.parent.#children.set(at.segment, this);
+  }
+
+  child(segment: string | number): Place | undefined {
+    return this.#children.get(segment);
+  }
+
+  get path(): Segments {
+    return this.parent ? [...this.parent.path, this.segment] : [];
+  }
 }
 
 export class Positions {
+  /** The whole file, once it is read. */
+  root: Place | null = null;
   readonly #lineStarts: number[];
-  readonly #places = new Map<string, Place>();
 
   constructor(text: string) {
     this.#lineStarts = [0];
     for (const lineBreak of text.matchAll(/\r\n|\r|\n/g)) {
       this.#lineStarts.push(lineBreak.index + lineBreak[0].length);
     }
-  }
-
-  /** Where a key is given twice, the first stays: later stages see the first value. */
-  add(path: string, key: number | null, value: number, isCollection: boolean): void {
-    if (!this.#places.has(path)) this.#places.set(path, { key, value, isCollection });
   }
 
   /** Line and column of an offset, both counted from 1. */
@@ -40,16 +67,19 @@ export class Positions {
     return { line: low + 1, column: offset - (this.#lineStarts[low] ?? 0) + 1 };
   }
 
-  /** Position of the node at a path, or of the nearest one around it; the first line when there is none.
+  /** Position of the node at a path, or of the nearest one around it; the first line when nothing was read.
    *  A collection is shown at its key: its first entry is already the next line. */
   find(path: string, code: string): Position {
-    for (let here: string | null = path; here !== null; here = parentPath(here)) {
-      const place = this.#places.get(here);
-      if (!place) continue;
-      const showKey = place.isCollection || here !== path || ABOUT_THE_KEY.has(code);
-      return this.at(showKey && place.key !== null ? place.key : place.value);
+    const segments = parsePath(path);
+    if (!this.root) return this.at(0);
+    let place: Place = this.root;
+    for (const segment of segments) {
+      const child = place.child(segment);
+      if (!child) break;
+      place = child;
     }
-    return this.at(0);
+    const showKey = place.isCollection || place.depth < segments.length || ABOUT_THE_KEY.has(code);
+    return this.at(showKey && place.key !== null ? place.key : place.value);
   }
 }
 

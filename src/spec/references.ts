@@ -1,77 +1,65 @@
 /** The spec's references: items as they stand, or the file that holds them. */
 
 import { type Problem, ProblemError } from '../problem.ts';
-import { formatPath } from './path.ts';
-import { locate } from './positions.ts';
+import { errorAt } from './error-at.ts';
+import { locate, type Positions } from './positions.ts';
 import { read } from './read.ts';
 import { shown, shownValue } from './shown.ts';
 import type { Reference } from './study.ts';
-import { childOf, entriesOf, isGroup } from './tree.ts';
+import { childOf, entriesOf, type Group, isGroup } from './tree.ts';
 
 /** Gives the text of the file a spec names. @throws {ProblemError} when it cannot be read, or may not. */
 export type ReferenceLoader = (path: string) => string;
 
-export interface LoadedReferences {
-  /** The items; null when they could not be read, so that no `cite` is called unresolved for it. */
-  items: Reference[] | null;
+export interface WithReferences {
+  /** The spec with the items in the place of their path. */
+  tree: unknown;
+  /** Where the items come from; null when they stand in the spec. */
+  source: { file: string; positions: Positions } | null;
+  /** Whether all items are known, so that a `cite` can be called unresolved. */
+  areKnown: boolean;
   problems: Problem[];
 }
 
-export function loadReferences(tree: unknown, load: ReferenceLoader | undefined): LoadedReferences {
-  const written = childOf(tree, 'references');
-  if (typeof written !== 'string') return { items: itemsOf(entriesOf(written)), problems: [] };
-  const failed = (code: string, message: string): LoadedReferences => ({
-    items: null,
-    problems: [{ level: 'error', code, path: 'references', message }],
-  });
-  if (!written.toLowerCase().endsWith('.json')) {
-    return failed('references-file', `Found ${shown(written)}, but the path of a .json file is needed.`);
+/** Puts the items of a references file into the spec, so that they are checked and hashed as if they stood there. */
+export function withReferences(tree: unknown, load: ReferenceLoader | undefined): WithReferences {
+  const path = childOf(tree, 'references');
+  if (typeof path !== 'string') return { tree, source: null, areKnown: true, problems: [] };
+  const failed = (problems: Problem[]): WithReferences => ({ tree, source: null, areKnown: false, problems });
+  const refused = (message: string): WithReferences =>
+    failed([errorAt('references-file', ['references'], message)]);
+  if (!path.toLowerCase().endsWith('.json')) {
+    return refused(`Found ${shown(path)}, but the path of a .json file is needed.`);
   }
-  if (!load) {
-    return failed(
-      'references-file',
-      'References in a file cannot be read here. Write the items into the spec.',
-    );
+  if (!load) return refused('References in a file cannot be read here. Write the items into the spec.');
+  const text = loadedText(path, load);
+  if (typeof text !== 'string') return failed(text);
+  const { tree: items, positions, problems } = read(text);
+  if (items !== undefined && !Array.isArray(items)) {
+    const message = `Found ${shownValue(items)}, but a list of CSL-JSON items is needed.`;
+    problems.push(errorAt('references-file', [], message));
   }
-  let text: string;
+  if (problems.length > 0) return failed(problems.map((problem) => locate(problem, positions, path)));
+  const whole = { ...(tree as Group), references: items };
+  return { tree: whole, source: { file: path, positions }, areKnown: true, problems: [] };
+}
+
+function loadedText(path: string, load: ReferenceLoader): string | Problem[] {
   try {
-    text = load(written);
+    return load(path);
   } catch (error) {
     if (!(error instanceof ProblemError)) throw error;
-    return {
-      items: null,
-      problems: error.problems.map((problem): Problem => ({ ...problem, path: 'references' })),
-    };
+    return error.problems.map((problem): Problem => ({ ...problem, path: 'references' }));
   }
-  return readReferences(text, written);
 }
 
-/** A CSL-JSON file: a list of items, each with an id. */
-function readReferences(text: string, file: string): LoadedReferences {
-  const { tree, positions, problems } = read(text);
-  const found = [...problems];
-  const report = (path: string, message: string): void => {
-    found.push({ level: 'error', code: 'references-file', path, message });
-  };
-  if (tree !== undefined && !Array.isArray(tree)) {
-    report('', `Found ${shownValue(tree)}, but a list of CSL-JSON items is needed.`);
-  }
-  for (const [index, item] of entriesOf(tree).entries()) {
-    const id = childOf(item, 'id');
-    if (typeof id === 'string' && id !== '') continue;
-    const path = formatPath(isGroup(item) ? [index, 'id'] : [index]);
-    report(
-      path,
-      `Found ${shownValue(isGroup(item) ? id : item)}, but an item with an id (a text) is needed.`,
-    );
-  }
-  if (found.length > 0)
-    return { items: null, problems: found.map((problem) => locate(problem, positions, file)) };
-  return { items: itemsOf(entriesOf(tree)), problems: [] };
-}
-
-function itemsOf(entries: readonly unknown[]): Reference[] {
-  return entries
-    .filter((entry) => isGroup(entry) && typeof entry.id === 'string')
-    .map((entry) => ({ type: 'document', ...(entry as Omit<Reference, 'type'>) }));
+/** The items of a spec that need not be valid. */
+export function referencesOf(tree: unknown): Reference[] {
+  return entriesOf(childOf(tree, 'references'))
+    .filter((entry): entry is Group & { id: string } => isGroup(entry) && typeof entry.id === 'string')
+    .map(({ page, ...entry }) => ({
+      type: 'document',
+      ...entry,
+      ...(page === undefined ? {} : { page: String(page) }),
+    }));
 }

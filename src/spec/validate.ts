@@ -5,6 +5,8 @@ import { type SchemaError, validateSharedAim, validateSpec } from '../generated/
 import type { Problem } from '../problem.ts';
 import { allowed, knownKeys, type SchemaNode, typesOf } from './allowed.ts';
 import { formMessage } from './effect-form.ts';
+import { errorAt } from './error-at.ts';
+import { LIMITS } from './limits.ts';
 import type { MethodInputs } from './method-inputs.ts';
 import { nearest } from './nearest.ts';
 import { formatPath, type Segments } from './path.ts';
@@ -20,18 +22,17 @@ export interface Finding extends Problem {
 /** Every way in which the tree departs from the schema; empty when it is a valid spec. */
 export function validate(tree: unknown): Finding[] {
   if (validateSpec(tree)) return [];
-  return (validateSpec.errors ?? []).flatMap((error) => problemsOf(error, tree));
+  // More than can be said is not put into words: a hostile file can break every rule a hundred thousand times.
+  return (validateSpec.errors ?? [])
+    .slice(0, 10 * LIMITS.problems)
+    .flatMap((error) => problemsOf(error, tree));
 }
 
 function problemsOf(error: SchemaError, tree: unknown): Finding[] {
   const path = segmentsOf(error.instancePath, tree);
-  // The forms of an effect are alternatives in the schema; one problem speaks for all that none of them fits.
-  const isAboutForms = /^#\/(then|else|allOf)\//.test(error.schemaPath) || path.at(-1) === 'effect';
-  if (isAboutForms && path[2] === 'inputs') {
-    const problems = effectProblems(error, path, tree);
-    if (problems) return problems;
-  }
-  if (error.keyword === 'discriminator') return methodProblems(error, path, tree);
+  const problems = path[2] === 'inputs' ? effectProblems(error, path, tree) : null;
+  if (problems) return problems;
+  if (error.keyword === 'discriminator') return methodProblems(path, tree);
   const problem = plainProblem(error, path, tree);
   return problem ? [problem] : [];
 }
@@ -46,22 +47,30 @@ function plainProblem(error: SchemaError, path: Segments, tree: unknown): Findin
     case 'additionalProperties':
       return unknownKey(path, String(error.params.additionalProperty), schema);
     case 'required':
+    case 'dependentRequired':
       return missingKey(path, String(error.params.missingProperty), schema);
     case 'minItems':
     case 'minProperties':
-      return problem('too-few', path, `Found ${shownValue(value)}, but at least one entry is needed.`);
+      return errorAt('too-few', path, `Found ${shownValue(value)}, but at least one entry is needed.`);
     case 'maxItems':
-      return problem(
+      return errorAt(
         'too-many',
         path,
         `Found ${String((value as unknown[]).length)} entries, but at most ${String(error.params.limit)} are read.`,
       );
     case 'uniqueItems':
-      return problem('repeated', path, `An entry is listed twice. Keep one.`);
+      return errorAt('repeated', path, `An entry is listed twice. Keep one.`);
+    case 'type':
+    case 'enum':
+    case 'const':
+    case 'minimum':
+    case 'maximum':
+    case 'exclusiveMinimum':
+    case 'exclusiveMaximum':
     case 'minLength':
       return notAllowed(path, value, schema);
     case 'maxLength':
-      return problem(
+      return errorAt(
         'too-long',
         path,
         `The text has more than ${Number(error.params.limit).toLocaleString('en')} characters. Shorten it.`,
@@ -69,16 +78,12 @@ function plainProblem(error: SchemaError, path: Segments, tree: unknown): Findin
     case 'pattern':
       // An empty text is reported once, by its length.
       return value === '' ? null : notAllowed(path, value, schema);
-    case 'oneOf':
-    case 'anyOf':
-    case 'not':
-      return problem(
+    default:
+      return errorAt(
         'combination',
         path,
-        'These keys cannot stand together like this. See `samplecase methods`.',
+        'These keys cannot stand together like this. `samplecase methods` shows what each method takes.',
       );
-    default:
-      return notAllowed(path, value, schema);
   }
 }
 
@@ -88,7 +93,7 @@ function notAllowed(path: Segments, value: unknown, schema: SchemaNode | null): 
   const found =
     typeof value === 'string' && value !== '' && value.trim() === '' ? 'a blank text' : shownValue(value);
   const hint = schema ? hintFor(value, schema) : '';
-  return problem('not-allowed', path, `Found ${found}, but ${wanted} is needed.${hint && ` ${hint}`}`);
+  return errorAt('not-allowed', path, `Found ${found}, but ${wanted} is needed.${hint && ` ${hint}`}`);
 }
 
 /** A quantity may be a number or a group of keys; to whoever wrote a number, only the number matters. */
@@ -110,7 +115,8 @@ function hintFor(value: unknown, schema: SchemaNode): string {
   if (types[0] === 'string' && (typeof value === 'number' || typeof value === 'boolean')) {
     return 'Put it in quotation marks.';
   }
-  if (types[0] === 'array' && (typeof value === 'string' || typeof value === 'number')) {
+  const entries = isGroup(schema.items) ? typesOf(schema.items) : [];
+  if (types[0] === 'array' && entries.includes(typeof value)) {
     return `Write it as a list: [${shownValue(value)}].`;
   }
   return '';
@@ -123,7 +129,8 @@ function numberHint(value: unknown, schema: SchemaNode): string {
       ? `Is ${number} % meant? Then write ${hundredth(number)}.`
       : '';
   if (typeof value === 'number') return percent(value);
-  if (typeof value !== 'string') return '';
+  // A number is short; on a long text the patterns below could take minutes.
+  if (typeof value !== 'string' || value.length > 40) return '';
   const text = value.trim();
   if (/^[-+]?(\d+\.?\d*|\.\d+)(e[-+]?\d+)?$/i.test(text) && Number.isFinite(Number(text)))
     return 'Write it without quotation marks.';
@@ -148,7 +155,7 @@ function unknownKey(path: Segments, key: string, schema: SchemaNode | null): Fin
     : near
       ? `Did you mean ${shown(near)}?`
       : `Known keys are ${listed(known, 'and')}.`;
-  const found = problem('unknown-key', [...path, key], `The key ${shown(key)} is not known here. ${step}`);
+  const found = errorAt('unknown-key', [...path, key], `The key ${shown(key)} is not known here. ${step}`);
   const meant = holder ? [...path, holder, key] : near ? [...path, near] : null;
   return meant ? { ...found, explains: formatPath(meant) } : found;
 }
@@ -157,26 +164,27 @@ function missingKey(path: Segments, key: string, schema: SchemaNode | null): Pro
   const wanted = schemaOfKey(schema, key);
   const takes = wanted ? ` It takes ${allowed(wanted)}.` : '';
   const meaning = typeof wanted?.description === 'string' ? ` ${wanted.description}` : '';
-  return problem('missing-key', [...path, key], `The key ${shown(key)} is missing.${takes}${meaning}`);
+  return errorAt('missing-key', [...path, key], `The key ${shown(key)} is missing.${takes}${meaning}`);
 }
 
-/** What is wrong with the form of an effect, or that it is missing; null for an error that is about neither. */
+/** What is wrong with the form of an effect, or that it is missing; null for an error that is about neither.
+ *  The forms are alternatives in the schema: one problem speaks for all that none of them fits. */
 function effectProblems(error: SchemaError, path: Segments, tree: unknown): Problem[] | null {
   const inputs = inputsOf(path, tree);
   if (!inputs) return null;
-  if (error.keyword === 'required' && error.params.missingProperty === 'effect' && path.length === 3) {
-    return [problem('missing-key', [...path, 'effect'], formMessage([], inputs.forms))];
+  if (path.length === 3 && error.params.missingProperty === 'effect') {
+    return [errorAt('missing-key', [...path, 'effect'], formMessage([], inputs.forms))];
   }
   const effect = valueAt(tree, path);
-  if (path.length !== 4 || !isGroup(effect)) return null;
-  if (error.keyword === 'additionalProperties') return null;
+  const isAboutForms = path.length === 4 && path[3] === 'effect' && error.keyword !== 'additionalProperties';
+  if (!isAboutForms || !isGroup(effect)) return null;
   const keys = Object.keys(effect);
   const known = keys.filter((key) => inputs.forms.some((form) => form.keys.includes(key)));
   const isMixed =
     known.length > 0 && !inputs.forms.some((form) => known.every((key) => form.keys.includes(key)));
   // A key that is not known is a problem of its own, and the form may be right once it is mended.
   if (known.length < keys.length && !isMixed) return [];
-  return [problem('effect-form', path, formMessage(keys, inputs.forms))];
+  return [errorAt('effect-form', path, formMessage(keys, inputs.forms))];
 }
 
 function inputsOf(path: Segments, tree: unknown): MethodInputs | null {
@@ -187,7 +195,7 @@ function inputsOf(path: Segments, tree: unknown): MethodInputs | null {
 }
 
 /** An unknown method, and what is wrong with the keys that all methods share. */
-function methodProblems(error: SchemaError, path: Segments, tree: unknown): Finding[] {
+function methodProblems(path: Segments, tree: unknown): Finding[] {
   const aim = valueAt(tree, path);
   const method = childOf(aim, 'method');
   const names = Object.keys(methodInputs);
@@ -196,14 +204,14 @@ function methodProblems(error: SchemaError, path: Segments, tree: unknown): Find
     const near = typeof method === 'string' ? nearest(method, names) : null;
     const step = near ? `Did you mean ${shown(near)}?` : `Methods are ${listed(names, 'and')}.`;
     problems.push(
-      problem(
+      errorAt(
         'unknown-method',
         [...path, 'method'],
         `Found ${shownValue(method)}, which is no method. ${step}`,
       ),
     );
   }
-  if (error.keyword !== 'discriminator' || validateSharedAim(aim)) return problems;
+  if (validateSharedAim(aim)) return problems;
   for (const shared of validateSharedAim.errors ?? []) {
     const inAim = segmentsOf(shared.instancePath, aim);
     const isAboutMethod = inAim[0] === 'method' || shared.params.missingProperty === 'method';
@@ -224,8 +232,4 @@ function segmentsOf(pointer: string, tree: unknown): (string | number)[] {
     value = childOf(value, segment);
   }
   return segments;
-}
-
-function problem(code: string, path: Segments, message: string): Problem {
-  return { level: 'error', code, path: formatPath(path), message };
 }

@@ -83,11 +83,12 @@ describe('what is shipped', () => {
   });
 });
 
-it('a source that does not compile is an error that names it', async () => {
+it('a source that does not compile is an error that names it, and leaves the last build', async () => {
   const project = join(folder, 'project');
   writeFileSync(
     join(project, 'src', 'half.ts'),
     'export const half: string = 1;\nexport type Half = number;\n',
   );
-  await expect(bundle({ root: project, out: join(folder, 'broken') })).rejects.toThrow(/half\.ts/);
+  await expect(bundle({ root: project, out: installed })).rejects.toThrow(/half\.ts/);
+  expect(existsSync(join(installed, 'index.js'))).toBe(true);
 });

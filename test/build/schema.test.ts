@@ -144,8 +144,8 @@ describe('the assembled schema', () => {
   });
 });
 
-function effectOf(inputs: JsonSchema | undefined): JsonSchema {
-  return (inputs?.properties as Record<string, JsonSchema>).effect as JsonSchema;
+function effectOf(inputs: JsonSchema = {}): JsonSchema {
+  return (inputs.properties as Record<string, JsonSchema>).effect as JsonSchema;
 }
 
 describe('the inputs of a method as data', () => {

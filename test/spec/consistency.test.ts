@@ -16,6 +16,11 @@ function with_(...changes: readonly (readonly [Path, unknown])[]): unknown {
 
 const aim = (change: object): object => ({ ...validAim(), ...change });
 const NO_MAXIMUM = [['sample', 'maximum'], undefined] as const;
+const interval = {
+  method: 'linear-r2-precision',
+  inputs: { predictors: 5, effect: { r2: 0.3 } },
+  criteria: { confidence: 0.95, width: 0.2 },
+};
 const power = { find: 'power', criteria: { alpha: 0.05 } };
 
 describe('a spec without contradiction', () => {
@@ -60,6 +65,10 @@ describe('a spec without contradiction', () => {
     [
       'tables of possible effects and powers',
       with_([['sensitivity'], { effects: [0.01, 0.99], targets: [0.5, 0.999], losses: [0, 0.5] }]),
+    ],
+    [
+      'an interval that needs no power, and tables of any width',
+      with_([['aims', 0], aim(interval)], [['sensitivity'], { targets: [5] }]),
     ],
     ['an acknowledgement of any aim', with_([['acknowledge'], [{ rule: 'M14', reason: 'So.' }]])],
   ])('%s', (_, spec) => {
@@ -181,7 +190,7 @@ describe('a contradiction is one problem at its place', () => {
       'a form without its leading key where it is needed',
       with_([['aims', 0, 'inputs', 'effect'], { r2_reduced: 0.1 }]),
       'aims[0].inputs.effect',
-      /r2_reduced alone; r2_full must stand beside it/,
+      /Found r2_reduced, which is not a whole form: add r2_full\./,
     ],
     [
       'a path that is no JSON file',

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { afterEach, describe, expect, it } from 'vitest';
 import { newSpecs } from '../../src/generated/new-specs.ts';
+import { LIMITS } from '../../src/spec/limits.ts';
 import { type ParsedSpec, parseSpec } from '../../src/spec/parse.ts';
 import { validSpec } from './valid-spec.ts';
 
@@ -202,6 +203,45 @@ describe('any text is answered and none throws', () => {
         expect(twice.problems).toEqual(once.problems);
       }),
       { numRuns: 200 },
+    );
+  });
+});
+
+/** Files that once took minutes or gigabytes, or could: the time limit of the test is the check. */
+describe('a hostile file of up to 1 MiB is answered like any other', () => {
+  const start = 'samplecase: 1\nstudy: {title: t, question: q, population: p, design: d}\n';
+  const aim = (effect: string): string =>
+    `aims: [{id: a, role: primary, objective: o, outcome: {name: n, unit: u}, analysis: a, method: linear-nested, inputs: {added: 1, adjusted_for: 1, effect: ${effect}}, criteria: {alpha: 0.05, power: 0.9}, find: sample-size}]\n`;
+  const many = (count: number, entry: (index: number) => string): string =>
+    Array.from({ length: count }, (_, index) => entry(index)).join(',');
+
+  it.each<[string, string]>([
+    ['a number of 900,000 digits in quotation marks', start + aim(`{f2: "${'1'.repeat(900_000)},"}`)],
+    ['thirty thousand aims', `${start}aims: [${many(30_000, () => '{}')}]`],
+    ['forty thousand unknown keys', `${start}${many(40_000, (i) => `\nk${i}: 1`).replaceAll(',', '')}`],
+    [
+      'ninety thousand formats',
+      `${start}${aim('{f2: 0.1}')}documents: [{kind: grant, formats: [${many(90_000, () => 'html')}]}]`,
+    ],
+    [
+      'forty thousand citations among fifteen thousand references',
+      `${start}${aim(`{f2: {value: 0.1, cite: [${many(40_000, (i) => `abcdefgh${i}`)}]}}`)}references: [${many(15_000, (i) => `{id: abcdefgx${i}}`)}]`,
+    ],
+    [
+      'sixty long keys inside each other',
+      `${start}x: ${many(60, () => `{${'k'.repeat(190)}: `).replaceAll(',', '')}[${many(80_000, () => '1')}]${'}'.repeat(60)}`,
+    ],
+    ['half a million brackets', '['.repeat(500_000)],
+  ])('%s', (_, text) => {
+    const answer = parseSpec(text);
+    isAnswered(answer);
+    expect(answer.problems.length).toBeLessThanOrEqual(LIMITS.problems + 1);
+  });
+
+  it('the problems that are not put into words are said to be there', () => {
+    const { problems } = parseSpec(`${start}aims: [${many(30_000, () => '{}')}]`);
+    expect(problems.at(-1)?.message).toBe(
+      'Not all problems are shown: there are more from here on. Mend the 200 above first.',
     );
   });
 });

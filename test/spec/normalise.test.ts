@@ -47,14 +47,14 @@ describe('the normalised study', () => {
   });
 
   it('makes a quantity of a number alone, with no basis', () => {
-    const [aim] = studyOf(changed(['aims', 0, 'inputs', 'effect'], { f2: 0.1 })).aims;
-    expect(aim?.quantities.f2).toEqual({
-      path: 'aims[0].inputs.effect.f2',
-      key: 'f2',
-      title: "Cohen's f²",
-      symbol: 'f²',
+    const [aim] = studyOf(changed(['aims', 0, 'inputs', 'effect'], { partial_r2: 0.1 })).aims;
+    expect(aim?.quantities.partial_r2).toEqual({
+      path: 'aims[0].inputs.effect.partial_r2',
+      key: 'partial_r2',
+      title: 'partial R²',
+      symbol: 'R²ₚ',
       unit: '',
-      range: { minimum: 0, maximum: Infinity, minimumIncluded: false, maximumIncluded: false },
+      range: { minimum: 0, maximum: 1, minimumIncluded: false, maximumIncluded: false },
       value: 0.1,
       low: null,
       high: null,
@@ -90,6 +90,45 @@ describe('the normalised study', () => {
     const study = studyOf(changed(['aims', 0], { ...validAim(), inputs, find: 'detectable-effect' }));
     expect(study.aims[0]?.effectKeys).toEqual(['r2_full', 'r2_reduced']);
     expect(Object.keys(study.aims[0]?.quantities ?? {})).toEqual(['r2_reduced']);
+  });
+
+  it('has two sides where the method has sides and none are stated', () => {
+    const inputs = { adjusted_for: 2, effect: { partial_correlation: 0.3 } };
+    const sided = { ...validAim(), method: 'linear-coefficient', inputs };
+    const sidesOf = (criteria: object): unknown => {
+      const { sides, sidesReason } =
+        studyOf(changed(['aims', 0], { ...sided, criteria })).aims[0]?.criteria ?? {};
+      return { sides, sidesReason };
+    };
+    expect(sidesOf({ alpha: 0.05, power: 0.9 })).toEqual({ sides: 2, sidesReason: null });
+    expect(sidesOf({ alpha: 0.05, power: 0.9, sides: 1, sides_reason: 'So.' })).toEqual({
+      sides: 1,
+      sidesReason: 'So.',
+    });
+  });
+
+  it.each([
+    [0.95, 0.05],
+    [0.9, 0.1],
+    [0.99, 0.01],
+    [0.999, 0.001],
+    [0.8, 0.2],
+  ])('an interval of confidence %d has alpha %d, to the last digit', (confidence, alpha) => {
+    const aim = {
+      ...validAim(),
+      method: 'linear-r2-precision',
+      inputs: { predictors: 5, effect: { r2: 0.3 } },
+      criteria: { confidence, width: 0.2, assurance: 0.8 },
+    };
+    expect(studyOf(changed(['aims', 0], aim)).aims[0]?.criteria).toEqual({
+      alpha,
+      power: null,
+      sides: null,
+      sidesReason: null,
+      confidence,
+      width: 0.2,
+      assurance: 0.8,
+    });
   });
 
   it('counts a term as one parameter unless it says more', () => {

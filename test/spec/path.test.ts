@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { formatPath, parentPath } from '../../src/spec/path.ts';
+import { formatPath, parsePath } from '../../src/spec/path.ts';
 
 describe('paths', () => {
   it.each([
@@ -13,17 +13,20 @@ describe('paths', () => {
     expect(formatPath(segments)).toBe(path);
   });
 
-  it('the parent of a path is the path without its last segment, whatever the keys', () => {
+  it('are read back, whatever the keys', () => {
     const segment = fc.oneof(
       fc.nat(50),
-      fc.string(),
-      fc.constantFrom('aims', 'x-y', '$schema', 'a"]', '\u202e', '\\'),
+      fc.string({ unit: 'grapheme' }),
+      fc.constantFrom('aims', 'x-y', '$schema', 'a"]', '\u202e', '\\', '', '0'),
     );
     fc.assert(
-      fc.property(fc.array(segment, { minLength: 1, maxLength: 6 }), (segments) => {
-        expect(parentPath(formatPath(segments))).toBe(formatPath(segments.slice(0, -1)));
+      fc.property(fc.array(segment, { maxLength: 6 }), (segments) => {
+        expect(parsePath(formatPath(segments))).toEqual(segments);
       }),
     );
-    expect(parentPath('')).toBeNull();
+  });
+
+  it('are read up to the first thing that is no path', () => {
+    expect(parsePath('aims[0] and more')).toEqual(['aims', 0]);
   });
 });

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { LIMITS, read } from '../../src/spec/read.ts';
+import { LIMITS } from '../../src/spec/limits.ts';
+import { read } from '../../src/spec/read.ts';
 
 /** What is said about a text, as `line:column code: message`. */
 function said(text: string): string[] {

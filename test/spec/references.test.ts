@@ -44,16 +44,42 @@ describe('references in a file of their own', () => {
     ['{"id": "a"}', 'refs.json:1  Found a group of keys (id), but a list of CSL-JSON items is needed.'],
     [
       '[{"id": "harbour2020"},\n {"title": "x"}]',
-      'refs.json:2 [1].id Found nothing, but an item with an id (a text) is needed.',
+      'refs.json:2 [1].id The key "id" is missing. It takes text. The name by which cite refers to it.',
     ],
-    ['[{"id": "harbour2020"},\n\n 3]', 'refs.json:3 [1] Found 3, but an item with an id (a text) is needed.'],
-    ['[{"id": 12}]', 'refs.json:1 [0].id Found 12, but an item with an id (a text) is needed.'],
+    [
+      '[{"id": "harbour2020", "author": "Smith", "issued": {"date-parts": [[2020, {}]]}}]',
+      'refs.json:1 [0].author Found "Smith", but a list is needed.',
+      'refs.json:1 [0].issued.date-parts[0][1] Found an empty group of keys, but a whole number or text is needed.',
+    ],
+    [
+      '[{"id": "harbour2020", "URL": "javascript:alert(1)"}]',
+      'refs.json:1 [0].URL Found "javascript:alert(1)", but an address that begins with https:// or http:// is needed.',
+    ],
+    [
+      '[{"id": "harbour2020"},\n\n {"id": "harbour2020"}]',
+      'refs.json:3 [1].id Two references have the id "harbour2020". Give each an id of its own, so that a citation names one.',
+    ],
     [
       '[{"id": "harbour2020"',
       'refs.json:1  A bracket [ or { is opened and not closed before this place. Close it.',
     ],
-  ])('%j is answered with its own file and line', (content, answer) => {
-    expect(said({ readReferences: () => content })).toEqual([answer]);
+  ])('%j is answered with its own file and line', (content, ...answers) => {
+    expect(said({ readReferences: () => content })).toEqual(answers);
+  });
+
+  it('keep keys that no page prints, and have pages as text', () => {
+    const { study } = parseSpec(text, {
+      readReferences: () => '[{"id": "harbour2020", "type": "book", "page": 12, "language": "en"}]',
+    });
+    expect(study?.references).toEqual([{ id: 'harbour2020', type: 'book', page: '12', language: 'en' }]);
+  });
+
+  it('are part of the hash exactly as written', () => {
+    const hashOf = (content: string): string | undefined =>
+      parseSpec(text, { readReferences: () => content }).study?.hash;
+    const inSpec = parseSpec(JSON.stringify(changed(['references'], [{ id: 'harbour2020', page: 12 }])));
+    expect(hashOf('[{"page": 12, "id": "harbour2020"}]')).toBe(inSpec.study?.hash);
+    expect(hashOf('[{"page": "12", "id": "harbour2020"}]')).not.toBe(inSpec.study?.hash);
   });
 
   it('that fail for a reason of ours are not hidden', () => {

@@ -1,9 +1,10 @@
 /** Lines for what happens when assumptions slip: ranges, margins, expected power. */
 
-import type { StudyPlan } from '../../plan/plan.ts';
+import type { AimPlan, StudyPlan } from '../../plan/plan.ts';
 import type { Outcome } from '../../sensitivity/ranges.ts';
 import type { AimSensitivity } from '../../sensitivity/sensitivity.ts';
 import { type Dialect, printed } from './dialect.ts';
+import { requiredLines } from './required-lines.ts';
 
 export function doubtLines(dialect: Dialect, sensitivity: AimSensitivity, study: StudyPlan): string[][] {
   return [
@@ -26,26 +27,30 @@ function rangeLines(dialect: Dialect, { plan, ranges }: AimSensitivity, study: S
   return [
     dialect.comment(`Ranges: to analyse, to enrol, and the ${plan.method.achieves} of the planned study`),
     ...[...ends, all].flatMap(({ name, outcome }) =>
-      outcome === null
-        ? []
-        : [dialect.comment(name), ...outcomeLines(dialect, outcome, plan.method.achieves, study)],
+      outcome === null ? [] : [dialect.comment(name), ...outcomeLines(dialect, outcome, plan, study)],
     ),
   ];
 }
 
-function outcomeLines(dialect: Dialect, outcome: Outcome, name: string, study: StudyPlan): string[] {
+function outcomeLines(dialect: Dialect, outcome: Outcome, plan: AimPlan, study: StudyPlan): string[] {
   const { required, achieved, moved } = outcome;
   const effect = dialect.call('effect', [], moved.values);
   const lines: string[] = [];
   if (required !== null) {
-    lines.push(dialect.show(dialect.call('needed', [effect, 'target']), String(required.evaluable)));
+    const requirement = { moved: moved.values, target: plan.target ?? 0, n: required.evaluable };
+    lines.push(...requiredLines(dialect, plan, requirement));
     lines.push(dialect.show(dialect.enrol(required.evaluable, moved.losses), String(required.enrol)));
   }
   if (achieved !== null) {
     if (moved.analysed !== study.evaluable) {
       lines.push(dialect.show(dialect.kept(study.enrol, moved.losses), String(moved.analysed)));
     }
-    lines.push(dialect.show(dialect.call(name, [dialect.number(moved.analysed), effect]), printed(achieved)));
+    lines.push(
+      dialect.show(
+        dialect.call(plan.method.achieves, [dialect.number(moved.analysed), effect]),
+        printed(achieved),
+      ),
+    );
   }
   return lines;
 }
@@ -69,12 +74,11 @@ function marginLines(dialect: Dialect, { plan, margins }: AimSensitivity, study:
       const losses = study.study.sample.losses.map(({ proportion }) =>
         proportion.path === quantity.path ? value : proportion.value,
       );
-      const needed = dialect.call('needed', [plan.method.effect.variable, dialect.number(floor)]);
       const left = Math.floor(
         Number(losses.reduce((kept, loss) => kept * (1 - loss), study.enrol).toFixed(6)),
       );
       return [
-        dialect.show(needed, String(left)),
+        ...requiredLines(dialect, plan, { moved: {}, target: floor, n: left }),
         dialect.show(dialect.kept(study.enrol, losses), String(left)),
       ];
     }),

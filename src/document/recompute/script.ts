@@ -1,11 +1,13 @@
 /** The lines a reviewer runs to get every number of an aim again, in a language that is not ours. One script
  *  is built, and each language spells it. */
 
+import type { Step } from '../../methods/method.ts';
 import { enrolledFor } from '../../plan/losses.ts';
 import type { AimPlan, StudyPlan } from '../../plan/plan.ts';
 import type { AimSensitivity } from '../../sensitivity/sensitivity.ts';
 import { type Dialect, printed } from './dialect.ts';
 import { doubtLines } from './doubt-lines.ts';
+import { requiredLines } from './required-lines.ts';
 import { tableLines } from './table-lines.ts';
 
 export function recomputeScript(dialect: Dialect, sensitivity: AimSensitivity, study: StudyPlan): string {
@@ -16,6 +18,7 @@ export function recomputeScript(dialect: Dialect, sensitivity: AimSensitivity, s
     stepByStep(dialect, plan),
     functions(dialect, plan),
     headline(dialect, plan, study),
+    ...alternativeLines(dialect, plan),
     ...tableLines(dialect, sensitivity, study),
     ...doubtLines(dialect, sensitivity, study),
   ];
@@ -72,32 +75,53 @@ function stepByStep(dialect: Dialect, plan: AimPlan): string[] {
     dialect.assign('n', dialect.number(plan.own.n)),
     ...(plan.effect === null ? [dialect.assign(plan.method.effect.variable, dialect.number(effect))] : []),
     ...steps.flatMap((step) => {
-      const line = dialect.assign(step.variable, step[dialect.language]);
+      const line = stepLine(dialect, step);
       return step.value === null ? line.split('\n') : [dialect.show(line, printed(step.value))];
     }),
   ];
 }
 
+/** A step without a variable defines functions of its own. */
+function stepLine(dialect: Dialect, step: Step): string {
+  const expression = step[dialect.language];
+  return step.variable === '' ? expression : dialect.assign(step.variable, expression);
+}
+
+/** Steps as a function of the number analysed and the effect. */
+function asFunction(dialect: Dialect, name: string, effectName: string, steps: readonly Step[]): string[] {
+  const last = steps.at(-1);
+  if (last === undefined) return [];
+  const body = steps.slice(0, -1).flatMap((step) => stepLine(dialect, step).split('\n'));
+  return dialect.define(name, [{ name: 'n' }, { name: effectName }], body, last[dialect.language]);
+}
+
 function functions(dialect: Dialect, plan: AimPlan): string[] {
   const effect = plan.effect ?? plan.own.detectable;
   if (effect === null) return [];
-  const name = plan.method.achieves;
-  const steps = plan.calculation.steps(plan.own.n, effect);
-  const last = steps.at(-1);
-  if (last === undefined) return [];
-  const body = steps
-    .slice(0, -1)
-    .flatMap((step) => dialect.assign(step.variable, step[dialect.language]).split('\n'));
+  const { method, calculation, own } = plan;
   return [
     dialect.comment('The same as a function of the number analysed and the effect'),
-    ...dialect.define(
-      name,
-      [{ name: 'n' }, { name: plan.method.effect.variable }],
-      body,
-      last[dialect.language],
-    ),
-    ...dialect.search(name, plan.calculation.smallestN, plan.method.achieves === 'power'),
+    ...asFunction(dialect, method.achieves, method.effect.variable, calculation.steps(own.n, effect)),
+    ...(method.isCostly === true
+      ? []
+      : dialect.search(method.achieves, calculation.smallestN, method.achieves === 'power')),
   ];
+}
+
+/** Under another convention: its function, and what its number and one fewer achieve. */
+function alternativeLines(dialect: Dialect, plan: AimPlan): string[][] {
+  const { effect, target, calculation, method } = plan;
+  if (effect === null || target === null) return [];
+  return calculation.alternatives(effect, target).map(({ key, description, n, steps }) => [
+    dialect.comment(description),
+    ...asFunction(dialect, `${method.achieves}_${key}`, method.effect.variable, steps(n)),
+    ...[n, n - 1].flatMap((count) => {
+      const value = count >= calculation.smallestN ? steps(count).at(-1)?.value : null;
+      if (value === null || value === undefined) return [];
+      const call = dialect.call(`${method.achieves}_${key}`, [dialect.number(count), method.effect.variable]);
+      return [dialect.show(call, printed(value))];
+    }),
+  ]);
 }
 
 function headline(dialect: Dialect, plan: AimPlan, study: StudyPlan): string[] {
@@ -106,8 +130,9 @@ function headline(dialect: Dialect, plan: AimPlan, study: StudyPlan): string[] {
   const losses = study.study.sample.losses.map((loss) => loss.proportion.value);
   const lines = [dialect.comment('Results')];
   if (plan.effect !== null && plan.unrounded !== null) {
-    lines.push(dialect.show(dialect.call('needed', [effectName, 'target']), String(plan.own.n)));
-    if (plan.oneFewer !== null && plan.oneFewer.achieved !== null) {
+    const target = plan.target ?? 0;
+    lines.push(...requiredLines(dialect, plan, { moved: {}, target, n: plan.own.n }));
+    if (plan.method.isCostly !== true && plan.oneFewer !== null && plan.oneFewer.achieved !== null) {
       const fewer = [dialect.number(plan.oneFewer.n), effectName];
       lines.push(dialect.show(dialect.call(name, fewer), printed(plan.oneFewer.achieved)));
     }

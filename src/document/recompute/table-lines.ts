@@ -3,10 +3,11 @@
 import type { StudyPlan } from '../../plan/plan.ts';
 import type { AimSensitivity } from '../../sensitivity/sensitivity.ts';
 import { type Dialect, printed } from './dialect.ts';
+import { requiredLines } from './required-lines.ts';
 
 export function tableLines(dialect: Dialect, sensitivity: AimSensitivity, study: StudyPlan): string[][] {
   return [
-    requiredLines(dialect, sensitivity),
+    requiredTableLines(dialect, sensitivity),
     powerLines(dialect, sensitivity, study),
     detectableLines(dialect, sensitivity),
   ];
@@ -39,13 +40,18 @@ function row(
   return [dialect.show(dialect.each(columns, variable, call), shown.join(' '))];
 }
 
-function requiredLines(dialect: Dialect, { plan, required }: AimSensitivity): string[] {
+function requiredTableLines(dialect: Dialect, { plan, required }: AimSensitivity): string[] {
   if (required === null || plan.target === null) return [];
   const { quantity, effects, targets, cells } = required;
   return [
     dialect.comment('Table of required numbers'),
     ...effects.flatMap((value, index) => {
       const found = known(targets, cells[index]);
+      if (plan.method.isCostly === true) {
+        return found.flatMap(({ at, cell }) =>
+          requiredLines(dialect, plan, { moved: { [quantity.key]: value }, target: at, n: cell }),
+        );
+      }
       const call = dialect.call('needed', [dialect.call('effect', [], { [quantity.key]: value }), 't']);
       return row(
         dialect,

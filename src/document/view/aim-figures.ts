@@ -7,7 +7,15 @@ import { powerCurve } from '../figures/power-curve.ts';
 import { formatPercent } from '../numbers.ts';
 import { achievedText } from './achieved.ts';
 import { limitText } from './aim-tables.ts';
-import { computedNumber, powerTarget, rangeText, typedNumber, unitText, withUnit } from './wording.ts';
+import {
+  computedNumber,
+  powerTarget,
+  rangeText,
+  typedNumber,
+  unitsOf,
+  unitText,
+  withUnit,
+} from './wording.ts';
 
 export interface Figure {
   /** File name, `ventilation-power.svg`. */
@@ -61,7 +69,7 @@ function marginFigure({ margins, plan }: AimSensitivity, words: Study): Figure |
   const first = margins[0];
   if (first === undefined || first.limits.length === 0) return null;
   const { aim, method } = plan;
-  const outcomeUnit = aim.outcome.unit;
+  const units = unitsOf(aim);
   const title = `How far the assumptions of the aim “${aim.id}” can slip`;
   return {
     name: `${aim.id}-margins.svg`,
@@ -71,7 +79,7 @@ function marginFigure({ margins, plan }: AimSensitivity, words: Study): Figure |
       title,
       description: `For each assumption its planned value, its stated range, and where the planned study falls below ${first.limits.map(({ floor }) => typedNumber(floor, '')).join(' and ')}.`,
       rows: margins.map(({ quantity, stage, limits }) => {
-        const unit = unitText(quantity.unit, outcomeUnit);
+        const unit = unitText(quantity.unit, units);
         const loss = words.sample.losses.find(({ proportion }) => proportion.path === quantity.path);
         const text = (value: number) =>
           stage === null

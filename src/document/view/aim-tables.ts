@@ -8,7 +8,16 @@ import type { Quantity, Study } from '../../spec/study.ts';
 import { formatCount, formatExact, formatPercent, formatSignificant } from '../numbers.ts';
 import type { Table } from '../table.ts';
 import { achievedText } from './achieved.ts';
-import { basisText, computedNumber, powerTarget, typedNumber, unitText, withUnit } from './wording.ts';
+import {
+  basisText,
+  computedNumber,
+  powerTarget,
+  typedNumber,
+  type Units,
+  unitsOf,
+  unitText,
+  withUnit,
+} from './wording.ts';
 
 type Column = Table['columns'][number];
 const left = (head: string): Column => ({ head, align: 'left' });
@@ -19,7 +28,7 @@ const NOTHING = '–';
 export function arithmeticTables({ plan }: AimSensitivity, words: Study) {
   const { method, calculation, effect, own } = plan;
   const aim = words.aims[plan.aim.index] ?? plan.aim;
-  const outcomeUnit = aim.outcome.unit;
+  const units = unitsOf(aim);
   const used = effect ?? own.detectable;
   const steps = used === null ? [] : calculation.steps(own.n, used).filter(({ value }) => value !== null);
   return {
@@ -47,7 +56,7 @@ export function arithmeticTables({ plan }: AimSensitivity, words: Study) {
             ]),
         ...Object.values(aim.quantities).map((quantity) => [
           `${quantity.title} (${code(quantity.key)})`,
-          withUnit(formatExact(quantity.value), unitText(quantity.unit, outcomeUnit)),
+          withUnit(formatExact(quantity.value), unitText(quantity.unit, units)),
           rangeCell(quantity),
           basisText(quantity.basis) ?? 'no basis stated',
           quantity.note ?? NOTHING,
@@ -68,7 +77,7 @@ export function arithmeticTables({ plan }: AimSensitivity, words: Study) {
               .map(({ meaning, symbol, value, unit }) => [
                 meaning,
                 symbol,
-                withUnit(formatSignificant(value, 10), unitText(unit, outcomeUnit)),
+                withUnit(formatSignificant(value, 10), unitText(unit, units)),
               ]),
           },
     symbols: {
@@ -105,22 +114,22 @@ export function arithmeticTables({ plan }: AimSensitivity, words: Study) {
 export function sensitivityTables(sensitivity: AimSensitivity, study: StudyPlan, words: Study) {
   const aim = words.aims[sensitivity.plan.aim.index] ?? sensitivity.plan.aim;
   return {
-    required: requiredTable(sensitivity, aim.outcome.unit, words.sample.unit),
-    power: powerTable(sensitivity, aim.outcome.unit, study, words),
+    required: requiredTable(sensitivity, unitsOf(aim), words.sample.unit),
+    power: powerTable(sensitivity, unitsOf(aim), study, words),
     detectable: detectableTable(sensitivity),
-    ranges: rangesTable(sensitivity, aim.outcome.unit, words),
-    margins: marginsTable(sensitivity, aim.outcome.unit, words),
+    ranges: rangesTable(sensitivity, unitsOf(aim), words),
+    margins: marginsTable(sensitivity, unitsOf(aim), words),
   };
 }
 
-function requiredTable({ required, plan }: AimSensitivity, outcomeUnit: string, unit: string): Table | null {
+function requiredTable({ required, plan }: AimSensitivity, units: Units, unit: string): Table | null {
   if (required === null) return null;
   const { quantity, effects, targets, cells, planned } = required;
   const isPower = plan.method.achieves === 'power';
   return {
     caption: `Number of ${unit} to analyse, by ${quantity.title} and ${isPower ? 'target power' : 'wanted width'}`,
     columns: [
-      left(head(quantity, outcomeUnit)),
+      left(head(quantity, units)),
       ...targets.map((target) => right(isPower ? `power ${powerTarget(target)}` : `width ${pure(target)}`)),
     ],
     rows: effects.map((value, row) => [
@@ -136,7 +145,7 @@ function requiredTable({ required, plan }: AimSensitivity, outcomeUnit: string, 
 
 function powerTable(
   { power, plan }: AimSensitivity,
-  outcomeUnit: string,
+  units: Units,
   study: StudyPlan,
   words: Study,
 ): Table | null {
@@ -146,7 +155,7 @@ function powerTable(
   return {
     caption: `${what} with ${formatCount(study.enrol)} ${words.sample.counts}, by ${quantity.title} and overall proportion lost`,
     columns: [
-      left(head(quantity, outcomeUnit)),
+      left(head(quantity, units)),
       ...losses.map((loss, column) =>
         right(
           `${formatPercent(Number(loss.toPrecision(3)))} lost, ${formatCount(evaluable[column] ?? 0)} left`,
@@ -181,7 +190,7 @@ function detectableTable({ detectable, plan }: AimSensitivity): Table | null {
   };
 }
 
-function rangesTable({ ranges, plan }: AimSensitivity, outcomeUnit: string, words: Study): Table | null {
+function rangesTable({ ranges, plan }: AimSensitivity, units: Units, words: Study): Table | null {
   if (ranges === null) return null;
   const cellsOf = (outcome: Outcome | null) =>
     outcome === null
@@ -210,7 +219,7 @@ function rangesTable({ ranges, plan }: AimSensitivity, outcomeUnit: string, word
       ...ranges.rows.map((row) => [
         name(row),
         row.stage === null
-          ? withUnit(rangeCell(row.quantity), unitText(row.quantity.unit, outcomeUnit))
+          ? withUnit(rangeCell(row.quantity), unitText(row.quantity.unit, units))
           : rangeCell(row.quantity),
         ...cellsOf(row.low),
         ...cellsOf(row.high),
@@ -224,7 +233,7 @@ function rangesTable({ ranges, plan }: AimSensitivity, outcomeUnit: string, word
   };
 }
 
-function marginsTable({ margins, plan }: AimSensitivity, outcomeUnit: string, words: Study): Table | null {
+function marginsTable({ margins, plan }: AimSensitivity, units: Units, words: Study): Table | null {
   const first = margins[0];
   if (first === undefined || first.limits.length === 0) return null;
   const isPower = plan.method.achieves === 'power';
@@ -242,14 +251,14 @@ function marginsTable({ margins, plan }: AimSensitivity, outcomeUnit: string, wo
       const text = (value: number) =>
         asLoss
           ? formatPercent(Number(value.toPrecision(3)))
-          : withUnit(computedNumber(value, quantity.unit), unitText(quantity.unit, outcomeUnit));
+          : withUnit(computedNumber(value, quantity.unit), unitText(quantity.unit, units));
       return [
         asLoss
           ? `lost: ${words.sample.losses.find(({ proportion }) => proportion.path === quantity.path)?.stage ?? stage}`
           : quantity.title,
         asLoss
           ? formatPercent(quantity.value)
-          : withUnit(typedNumber(quantity.value, quantity.unit), unitText(quantity.unit, outcomeUnit)),
+          : withUnit(typedNumber(quantity.value, quantity.unit), unitText(quantity.unit, units)),
         ...limits.map((limit) => limitText(limit, text)),
       ];
     }),
@@ -261,8 +270,8 @@ export function limitText({ value, reason }: Limit, text: (value: number) => str
   return reason === 'already-below' ? 'already short of it' : 'at no value';
 }
 
-function head(quantity: Quantity, outcomeUnit: string): string {
-  const unit = unitText(quantity.unit, outcomeUnit);
+function head(quantity: Quantity, units: Units): string {
+  const unit = unitText(quantity.unit, units);
   return unit === '' ? quantity.title : `${quantity.title} (${unit})`;
 }
 

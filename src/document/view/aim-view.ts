@@ -24,6 +24,8 @@ import {
   sentence,
   stated,
   typedNumber,
+  type Units,
+  unitsOf,
   unitText,
   withUnit,
 } from './wording.ts';
@@ -45,12 +47,12 @@ export function aimView(sensitivity: AimSensitivity, study: StudyPlan, words: St
   const { criteria } = plan.aim;
   const quantities = Object.values(aim.quantities);
   const leading = quantities.find(({ key }) => key === plan.aim.effectKeys[0]) ?? null;
-  const outcomeUnit = aim.outcome.unit;
+  const units = unitsOf(aim);
   const bySensitivity = sensitivityTables(sensitivity, study, words);
   const yieldText = (at: Yield) => ({
     n: formatCount(at.n),
     achieved: achievedText(plan, at.achieved),
-    detectable: at.detectable === null ? null : detectableText(plan, at.detectable, outcomeUnit),
+    detectable: at.detectable === null ? null : detectableText(plan, at.detectable, units),
   });
   return {
     ...common,
@@ -73,32 +75,29 @@ export function aimView(sensitivity: AimSensitivity, study: StudyPlan, words: St
     inputs: inputWords(aim),
     terms: { tested: termsText(aim.terms.tested), adjustedFor: termsText(aim.terms.adjusted_for) },
     alpha: formatProbability(criteria.alpha),
-    target: targetText(plan, target, outcomeUnit),
+    target: targetText(plan, target, units),
     sides: criteria.sides === null ? null : criteria.sides === 1 ? 'one-sided' : 'two-sided',
     isOneSided: criteria.sides === 1,
     sidesReason: aim.criteria.sidesReason === null ? null : sentence(aim.criteria.sidesReason),
     confidence: criteria.confidence === null ? null : formatPercent(criteria.confidence),
-    widthGoal: widthGoal(plan, outcomeUnit),
+    widthGoal: widthGoal(plan, units),
     widthKind: criteria.assurance === null ? 'expected' : `${formatPercent(criteria.assurance)} assured`,
-    stated: leading === null || effect === null ? null : statedEffect(plan, leading, outcomeUnit),
-    effects: effectWords(plan, outcomeUnit),
-    nuisance: quantities
-      .filter((quantity) => quantity !== leading)
-      .map((one) => nuisanceWords(one, outcomeUnit)),
+    stated: leading === null || effect === null ? null : statedEffect(plan, leading, units),
+    effects: effectWords(plan, units),
+    nuisance: quantities.filter((quantity) => quantity !== leading).map((one) => nuisanceWords(one, units)),
     values: stepValues(plan),
     own: yieldText(own),
-    ownDetectable: own.detectable === null ? null : detectableText(plan, own.detectable, outcomeUnit),
+    ownDetectable: own.detectable === null ? null : detectableText(plan, own.detectable, units),
     oneFewer: oneFewer === null ? null : yieldText(oneFewer),
     planned: yieldText(planned),
-    plannedDetectable:
-      planned.detectable === null ? null : detectableText(plan, planned.detectable, outcomeUnit),
+    plannedDetectable: planned.detectable === null ? null : detectableText(plan, planned.detectable, units),
     differs: planned.n !== own.n,
     attainable: attainable === null ? null : yieldText(attainable),
-    detectable: planned.detectable === null ? null : detectableText(plan, planned.detectable, outcomeUnit),
+    detectable: planned.detectable === null ? null : detectableText(plan, planned.detectable, units),
     alternatives:
       effect === null || target === null
         ? []
-        : calculation.alternatives(own.n, effect, target).map((one) => ({ ...one, n: formatCount(one.n) })),
+        : calculation.alternatives(effect, target).map((one) => ({ ...one, n: formatCount(one.n) })),
     doubt: doubtSentences(sensitivity, study, words),
     tables: { ...arithmeticTables(sensitivity, words), ...bySensitivity },
     sensitivityTables: Object.values(bySensitivity).filter((table) => table !== null),
@@ -110,36 +109,36 @@ export function aimView(sensitivity: AimSensitivity, study: StudyPlan, words: St
   };
 }
 
-function detectableText(plan: AimPlan, effect: number, outcomeUnit: string): string {
-  return effectText(plan.calculation.equivalents(effect), plan.aim.effectKeys[0] ?? null, outcomeUnit);
+function detectableText(plan: AimPlan, effect: number, units: Units): string {
+  return effectText(plan.calculation.equivalents(effect), plan.aim.effectKeys[0] ?? null, units);
 }
 
-function targetText({ method }: AimPlan, target: number | null, outcomeUnit: string): string | null {
+function targetText({ method }: AimPlan, target: number | null, units: Units): string | null {
   if (target === null) return null;
   if (method.achieves === 'power') return powerTarget(target);
-  return withUnit(typedNumber(target, method.achievedUnit), unitText(method.achievedUnit, outcomeUnit));
+  return withUnit(typedNumber(target, method.achievedUnit), unitText(method.achievedUnit, units));
 }
 
 /** 'at most .2 wide (lower to upper limit) with an assurance of 80 %'. */
-function widthGoal(plan: AimPlan, outcomeUnit: string): string | null {
+function widthGoal(plan: AimPlan, units: Units): string | null {
   const { assurance, width } = plan.aim.criteria;
   if (width === null) return null;
-  const wide = `${targetText(plan, width, outcomeUnit)} wide from its lower to its upper limit`;
+  const wide = `${targetText(plan, width, units)} wide from its lower to its upper limit`;
   return assurance === null
     ? `expected to be at most ${wide}`
     : `that is at most ${wide} with a probability of ${formatProbability(assurance)}`;
 }
 
-function statedEffect(plan: AimPlan, quantity: Quantity, outcomeUnit: string) {
+function statedEffect(plan: AimPlan, quantity: Quantity, units: Units) {
   const others =
     plan.effect === null
       ? []
       : plan.calculation
           .equivalents(plan.effect)
           .filter(({ key }) => key !== quantity.key)
-          .map((one) => equivalentText(one, outcomeUnit));
+          .map((one) => equivalentText(one, units));
   return {
-    text: stated(quantity, outcomeUnit),
+    text: stated(quantity, units),
     also: others.length === 0 ? null : others.join('; '),
     range: rangeText(quantity),
     basis: basisText(quantity.basis),
@@ -148,8 +147,8 @@ function statedEffect(plan: AimPlan, quantity: Quantity, outcomeUnit: string) {
   };
 }
 
-function nuisanceWords(quantity: Quantity, outcomeUnit: string) {
-  const unit = unitText(quantity.unit, outcomeUnit);
+function nuisanceWords(quantity: Quantity, units: Units) {
+  const unit = unitText(quantity.unit, units);
   return {
     title: quantity.title,
     text: withUnit(typedNumber(quantity.value, quantity.unit), unit),
@@ -161,7 +160,7 @@ function nuisanceWords(quantity: Quantity, outcomeUnit: string) {
 }
 
 /** Every form of the planned effect by key, as number and as percent; null where the inputs do not give it. */
-function effectWords({ calculation, effect, method }: AimPlan, outcomeUnit: string) {
+function effectWords({ calculation, effect, method }: AimPlan, units: Units) {
   const keys = ['f2', 'r2', 'partial_r2', ...method.forms.map((form) => form.keys[0])];
   const none = Object.fromEntries(keys.map((key) => [key, null]));
   if (effect === null) return none;
@@ -170,7 +169,7 @@ function effectWords({ calculation, effect, method }: AimPlan, outcomeUnit: stri
       [
         key,
         {
-          text: withUnit(computedNumber(value, unit), unitText(unit, outcomeUnit)),
+          text: withUnit(computedNumber(value, unit), unitText(unit, units)),
           percent: `${formatSignificant(100 * value, 3)} %`,
         },
       ] as const,
@@ -181,9 +180,12 @@ function effectWords({ calculation, effect, method }: AimPlan, outcomeUnit: stri
 /** Inputs that are no assumptions: counts as numbers, choices as `is` flags and text. */
 function inputWords(aim: Aim): Record<string, string | number | boolean | null> {
   const given: Readonly<Record<string, unknown>> = { ...aim.inputs };
-  const words = methodInputs[aim.method].others.map((input) => {
-    const value = given[input.key] ?? input.default ?? null;
-    return [input.key, value as string | number | boolean | null] as const;
+  const words = methodInputs[aim.method].others.map(({ path, default: preset }) => {
+    const value = path.reduce<unknown>(
+      (tree, key) => (tree as Record<string, unknown> | undefined)?.[key],
+      given,
+    );
+    return [path.join('_'), (value ?? preset ?? null) as string | number | boolean | null] as const;
   });
   return { ...Object.fromEntries(words), sampled: given.predictor_values !== 'fixed' };
 }

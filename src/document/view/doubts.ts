@@ -6,7 +6,16 @@ import type { AimSensitivity } from '../../sensitivity/sensitivity.ts';
 import type { Study } from '../../spec/study.ts';
 import { formatCount, formatPercent, formatPower } from '../numbers.ts';
 import { achievedText } from './achieved.ts';
-import { computedNumber, list, powerTarget, typedNumber, unitText, withUnit } from './wording.ts';
+import {
+  computedNumber,
+  list,
+  powerTarget,
+  typedNumber,
+  type Units,
+  unitsOf,
+  unitText,
+  withUnit,
+} from './wording.ts';
 
 export interface DoubtWords {
   whatIf: string | null;
@@ -32,8 +41,8 @@ function whatIf({ plan, ranges }: AimSensitivity, { sample, aims }: Study): stri
   const end = row[row.unfavourable];
   const value = row.quantity[row.unfavourable];
   if (end === null || value === null) return null;
-  const outcomeUnit = aims[plan.aim.index]?.outcome.unit ?? '';
-  const ifIs = `If the ${nameOf(row, sample.losses)} is ${valueText(row, value, outcomeUnit)}, the planned study has ${achievedPhrase(plan, end.achieved)}`;
+  const units = unitsOf(aims[plan.aim.index] ?? plan.aim);
+  const ifIs = `If the ${nameOf(row, sample.losses)} is ${valueText(row, value, units)}, the planned study has ${achievedPhrase(plan, end.achieved)}`;
   if (end.required === null || plan.target === null) return `${ifIs}.`;
   const goal =
     plan.method.achieves === 'power' ? `a power of ${powerTarget(plan.target)}` : 'the wanted width';
@@ -52,10 +61,10 @@ function nameOf(
 function valueText(
   { quantity, stage }: Pick<RangeRow, 'stage' | 'quantity'>,
   value: number,
-  outcomeUnit: string,
+  units: Units,
 ): string {
   if (stage !== null) return formatPercent(value);
-  return withUnit(typedNumber(value, quantity.unit), unitText(quantity.unit, outcomeUnit));
+  return withUnit(typedNumber(value, quantity.unit), unitText(quantity.unit, units));
 }
 
 function achievedPhrase(plan: AimSensitivity['plan'], achieved: number | null): string {
@@ -70,7 +79,7 @@ function margin(
   _study: StudyPlan,
   { sample, aims }: Study,
 ): string | null {
-  const outcomeUnit = aims[plan.aim.index]?.outcome.unit ?? '';
+  const units = unitsOf(aims[plan.aim.index] ?? plan.aim);
   const floors = margins[0]?.limits.map(({ floor }) => floor) ?? [];
   const floor = floors.find((one) => one !== plan.target) ?? null;
   if (floor === null) return null;
@@ -79,7 +88,7 @@ function margin(
     if (limit === undefined || limit.value === null) return [];
     const text =
       stage === null
-        ? withUnit(computedNumber(limit.value, quantity.unit), unitText(quantity.unit, outcomeUnit))
+        ? withUnit(computedNumber(limit.value, quantity.unit), unitText(quantity.unit, units))
         : formatPercent(Number(limit.value.toPrecision(3)));
     return [`the ${nameOf({ quantity, stage }, sample.losses)} at ${text}`];
   });
@@ -104,8 +113,8 @@ function worst({ plan, ranges }: AimSensitivity, { sample }: Study): string | nu
 function assurance({ plan, assurance: found }: AimSensitivity, { aims }: Study): string | null {
   if (found === null) return null;
   const { quantity, low, high, mode, expected } = found;
-  const outcomeUnit = aims[plan.aim.index]?.outcome.unit ?? '';
+  const units = unitsOf(aims[plan.aim.index] ?? plan.aim);
   const text = (value: number) => typedNumber(value, quantity.unit);
-  const unit = unitText(quantity.unit, outcomeUnit);
+  const unit = unitText(quantity.unit, units);
   return `Averaged over a triangular distribution of the ${quantity.title} from ${text(low)} to ${withUnit(text(high), unit)} with its mode at ${text(mode)}, the expected power is ${formatPower(expected)}`;
 }

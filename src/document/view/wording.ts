@@ -1,7 +1,7 @@
 /** How the pages word values, units and grounds: one place, one choice. */
 
 import type { Equivalent } from '../../methods/method.ts';
-import type { Basis, Quantity, Role } from '../../spec/study.ts';
+import type { Aim, Basis, Quantity, Role } from '../../spec/study.ts';
 import { formatExact, formatProbability, formatSignificant } from '../numbers.ts';
 
 const BASES: Record<Basis, string> = {
@@ -52,10 +52,27 @@ export function powerTarget(value: number): string {
   return /^\.\d$/.test(exact) ? `${exact}0` : exact;
 }
 
-/** The unit behind a quantity: that of the outcome where the schema says so. */
-export function unitText(unit: string, outcomeUnit: string): string {
-  if (unit === '') return '';
-  return unit.replace('outcome', outcomeUnit).replace('/', ' per unit of the ');
+/** Units of an aim's variables, as its author writes them; '' where they are not stated. */
+export interface Units {
+  outcome: string;
+  predictor: string;
+  moderator: string;
+}
+
+export function unitsOf(aim: Aim): Units {
+  const named = aim.inputs as { predictor?: { unit?: string }; moderator?: { unit?: string } };
+  return {
+    outcome: aim.outcome.unit,
+    predictor: named.predictor?.unit ?? '',
+    moderator: named.moderator?.unit ?? '',
+  };
+}
+
+/** The unit that the schema names by its variable, or by two of them: `outcome/predictor`. */
+export function unitText(unit: string, units: Units): string {
+  if (unit === 'outcome/predictor')
+    return `${units.outcome} per ${units.predictor || 'unit of the predictor'}`;
+  return unit === '' ? '' : units[unit as keyof Units];
 }
 
 export function withUnit(text: string, unit: string): string {
@@ -63,8 +80,8 @@ export function withUnit(text: string, unit: string): string {
 }
 
 /** 'partial R² of .06', with its unit. */
-export function stated(quantity: Quantity, outcomeUnit: string, value = quantity.value): string {
-  const text = withUnit(typedNumber(value, quantity.unit), unitText(quantity.unit, outcomeUnit));
+export function stated(quantity: Quantity, units: Units, value = quantity.value): string {
+  const text = withUnit(typedNumber(value, quantity.unit), unitText(quantity.unit, units));
   return `${quantity.title} of ${text}`;
 }
 
@@ -76,20 +93,20 @@ export function rangeText(quantity: Quantity): string | null {
   return null;
 }
 
-export function equivalentText({ meaning, value, unit }: Equivalent, outcomeUnit: string): string {
-  return `${meaning} of ${withUnit(computedNumber(value, unit), unitText(unit, outcomeUnit))}`;
+export function equivalentText({ meaning, value, unit }: Equivalent, units: Units): string {
+  return `${meaning} of ${withUnit(computedNumber(value, unit), unitText(unit, units))}`;
 }
 
 /** The stated form first, the others in parentheses behind it. */
 export function effectText(
   equivalents: readonly Equivalent[],
   leadingKey: string | null,
-  outcomeUnit: string,
+  units: Units,
 ): string {
   const leading = equivalents.find(({ key }) => key === leadingKey) ?? equivalents[0];
   if (leading === undefined) return '';
-  const others = equivalents.filter((one) => one !== leading).map((one) => equivalentText(one, outcomeUnit));
-  const text = equivalentText(leading, outcomeUnit);
+  const others = equivalents.filter((one) => one !== leading).map((one) => equivalentText(one, units));
+  const text = equivalentText(leading, units);
   return others.length === 0 ? text : `${text} (${others.join('; ')})`;
 }
 

@@ -1,13 +1,23 @@
 /** Power of the F test as a mixture of central tails at the critical value. */
 
-import { requireBetween, requireNonNegative, requireProbability } from '../domain.ts';
 import { betaUpperQuantile, betaUpperTail } from '../distributions/beta.ts';
+import { requireBetween, requireNonNegative, requireProbability } from '../domain.ts';
 import { incompleteBetaFront } from '../special/incomplete-beta.ts';
 import { logGamma } from '../special/log-gamma.ts';
 
-interface Weights { start: number; logWeight: number; ratio: (j: number) => number }
+interface Weights {
+  start: number;
+  logWeight: number;
+  ratio: (j: number) => number;
+}
 
-function mixture(x: number, alpha: number, a: number, b: number, { start, logWeight, ratio }: Weights): number {
+function mixture(
+  x: number,
+  alpha: number,
+  a: number,
+  b: number,
+  { start, logWeight, ratio }: Weights,
+): number {
   let weight = Math.exp(logWeight);
   let left = 1;
   let tail = start === 0 ? alpha : betaUpperTail(x, a + start, b);
@@ -52,7 +62,11 @@ export function sampledFTestPower(alpha: number, df1: number, df2: number, parti
   return mixture(x, alpha, df1 / 2, df2 / 2, {
     start,
     logWeight:
-      logGamma(size + start) - logGamma(size) - logGamma(start + 1) + size * Math.log1p(-partialR2) + start * Math.log(partialR2),
+      logGamma(size + start) -
+      logGamma(size) -
+      logGamma(start + 1) +
+      size * Math.log1p(-partialR2) +
+      start * Math.log(partialR2),
     ratio: (j) => ((size + j) / (j + 1)) * partialR2,
   });
 }

@@ -2,12 +2,20 @@ import { betaUpperTail } from '../distributions/beta.ts';
 import { tUpperQuantile } from '../distributions/student-t.ts';
 import { logGamma } from '../special/log-gamma.ts';
 
-function signedMixture(t: number, df: number, logFirst: (j: number) => number, logSecond: (j: number) => number, peak: number): number {
+function signedMixture(
+  t: number,
+  df: number,
+  logFirst: (j: number) => number,
+  logSecond: (j: number) => number,
+  peak: number,
+): number {
   const x = (t * t) / (df + t * t);
   let sum = 0;
   for (let j = 0; ; j += 1) {
     const term =
-      (Math.exp(logFirst(j)) * betaUpperTail(x, j + 0.5, df / 2) + Math.exp(logSecond(j)) * betaUpperTail(x, j + 1, df / 2)) / 2;
+      (Math.exp(logFirst(j)) * betaUpperTail(x, j + 0.5, df / 2) +
+        Math.exp(logSecond(j)) * betaUpperTail(x, j + 1, df / 2)) /
+      2;
     sum += term;
     if (j > peak && term < 1e-17 * sum) return sum;
   }

@@ -1,5 +1,5 @@
 import type { BetaPoint } from './beta-point.ts';
-import { devianceTerm } from './deviance.ts';
+import { devianceTerm, isNearMean } from './deviance.ts';
 import { productError, quotientError, sumError } from './double-double.ts';
 import { stirlingError } from './stirling-error.ts';
 
@@ -7,7 +7,7 @@ import { stirlingError } from './stirling-error.ts';
  *  ln(x/(1-x)). `excess` is excessOverMean(point, a, b).
  *  Nothing cancels: the deviance is a sum of two positive terms, and ln Γ enters by its Stirling errors only.
  *  Domain (not checked): 0 < x < 1; a, b ≥ 1/4.
- *  Source: Loader (2000), Fast and accurate computation of binomial probabilities, saddle-point form. */
+ *  Source: Loader (2000), Fast and accurate computation of binomial probabilities: the saddle-point form. */
 export function logBetaFront(point: BetaPoint, a: number, b: number, excess: number): number {
   const total = a + b;
   const deviance =
@@ -17,9 +17,9 @@ export function logBetaFront(point: BetaPoint, a: number, b: number, excess: num
   return 0.5 * Math.log((a / total) * (b / (2 * Math.PI))) + stirling - deviance;
 }
 
-/** Deviance of a share x from its mean a/(a + b); u = (a + b)x/a - 1. */
+/** Deviance of a share x from its mean a/(a + b); u is (a + b)x/a - 1, formed without cancellation. */
 function devianceOf(x: number, xLow: number, a: number, b: number, u: number): number {
-  if (u >= -0.5 && u <= 1) return devianceTerm(u, 1, 0);
+  if (isNearMean(u)) return devianceTerm(u, 1 + u, 0);
   const total = a + b;
   const scaled = total * x;
   const scaledLow = productError(total, x, scaled) + sumError(a, b, total) * x + total * xLow;

@@ -10,7 +10,7 @@ export interface BetaPoint {
   complementLow: number;
 }
 
-/** The point x as given; when the complement is given too, the smaller of the two counts as exact. */
+/** The point x, 0 ≤ x ≤ 1, as given; when the complement is given too, the smaller of the two counts as exact. */
 export function betaPoint(x: number, complement: number = 1 - x): BetaPoint {
   if (x <= complement) {
     const rest = 1 - x;
@@ -20,11 +20,16 @@ export function betaPoint(x: number, complement: number = 1 - x): BetaPoint {
   return { x: rest, xLow: sumError(1, -complement, rest), complement, complementLow: 0 };
 }
 
-/** x = s/(s + t), where s = first·second is taken exactly: df1·F for the F distribution, t·t for Student's. */
+/** x = s/(s + t), where s = first·second is taken exactly: df1·F against df2 for the F distribution, t·t
+ *  against df for Student's. All three positive; s/t from 1e-308 to 1e308. */
 export function betaPointOfProduct(first: number, second: number, t: number): BetaPoint {
   const s = first * second;
-  if (s < 1e-200 * t || s < 1e-200) return { x: s / t, xLow: 0, complement: 1, complementLow: -s / t };
-  if (s > 1e200 * t || s > 1e200) {
+  // So far out the rounding of s no longer matters, and its exact parts might leave the range of doubles.
+  if (s < 1e-200) {
+    const x = s / t;
+    return { x, xLow: 0, complement: 1, complementLow: -x };
+  }
+  if (s > 1e200) {
     const complement = t / first / second;
     return { x: 1, xLow: -complement, complement, complementLow: 0 };
   }

@@ -1,12 +1,12 @@
-/** Lower tail of the beta distribution over its front factor x^a y^b / B(a, b).
- *  Converges fast where `excess` = b·x - a·y ≤ 1, and then all its terms up to n = b are positive: about
- *  6 (ab/(a + b))^(1/3) steps at the mean, fewer in the tail.
- *  Domain (not checked): 0 < x < 1, y = 1 - x, a, b ≥ 1/4.
- *  Source: DiDonato & Morris (1992), Algorithm 708, continued fraction (BFRAC), with λ = -excess. */
+/** Lower tail of the beta distribution over its front factor x^a y^b / B(a, b), where y = 1 - x and
+ *  `excess` = b·x - a·y is at most 1. There the fraction converges fast, in about 6 (ab/(a + b))^(1/3) steps at
+ *  the mean and fewer in the tail, and its terms are positive up to the b-th.
+ *  Domain (not checked): 0 < x < 1; a, b ≥ 1/4, one of them up to 1e100.
+ *  Source: DiDonato & Morris (1992), Algorithm 708, the continued fraction of their section on BFRAC, with
+ *  λ = -excess; forward recurrence of convergents, Abramowitz & Stegun (1964) 3.10.1. */
 export function incompleteBetaFraction(a: number, b: number, x: number, y: number, excess: number): number {
   const lift = 1 - excess;
   const liftStep = 1 + y;
-  // Convergents numerator/denominator by forward recurrence, as in Wallis (Abramowitz & Stegun 3.10.1).
   let inverse = 1 / (a + 1);
   let numeratorBefore = 0;
   let denominatorBefore = 1;
@@ -24,15 +24,16 @@ export function incompleteBetaFraction(a: number, b: number, x: number, y: numbe
     denominatorBefore = denominator;
     numerator = numeratorNext;
     denominator = denominatorNext;
+    // Equal ratios, compared without dividing.
     const cross = numerator * denominatorBefore;
     if (Math.abs(cross - numeratorBefore * denominator) <= CONVERGED * Math.abs(cross)) {
       return numerator / denominator;
     }
-    if (denominator > 1e100) {
-      numeratorBefore *= 1e-100;
-      denominatorBefore *= 1e-100;
-      numerator *= 1e-100;
-      denominator *= 1e-100;
+    if (denominator > RESCALE_ABOVE) {
+      numeratorBefore /= RESCALE_ABOVE;
+      denominatorBefore /= RESCALE_ABOVE;
+      numerator /= RESCALE_ABOVE;
+      denominator /= RESCALE_ABOVE;
     }
   }
   throw new Error(`incompleteBetaFraction: no convergence at a ${a}, b ${b}, x ${x}, excess ${excess}`);
@@ -40,5 +41,7 @@ export function incompleteBetaFraction(a: number, b: number, x: number, y: numbe
 
 /** Two steps that agree to this are within rounding of the limit. */
 const CONVERGED = 2e-16;
-/** At shapes of 1e7 and the mean about 1300 steps are taken. */
+/** Products of two convergents stay within the range of doubles. */
+const RESCALE_ABOVE = 1e100;
+/** At the mean of shapes of 1e7 about 1300 steps are taken. */
 const MOST_STEPS = 100_000;

@@ -4,16 +4,12 @@
 import { methodInputs } from '../../generated/inputs.ts';
 import type { Problem } from '../../problem.ts';
 import type { MethodInputs } from '../method-inputs.ts';
-import { formatPath, type Segments } from '../path.ts';
+import type { Segments } from '../path.ts';
 import type { Reference } from '../study.ts';
 import { childOf, entriesOf } from '../tree.ts';
 
 /** @param references null when they could not be read */
 export type Check = (tree: unknown, references: readonly Reference[] | null) => Problem[];
-
-export function problem(code: string, path: Segments, message: string): Problem {
-  return { level: 'error', code, path: formatPath(path), message };
-}
 
 export interface WrittenAim {
   path: Segments;

@@ -1,10 +1,11 @@
 /** Names that must stand for one thing. */
 
 import type { Problem } from '../../problem.ts';
+import { errorAt } from '../error-at.ts';
 import type { Segments } from '../path.ts';
 import { shown } from '../shown.ts';
 import { childOf, entriesOf } from '../tree.ts';
-import { aimsOf, type Check, problem, textAt } from './check.ts';
+import { aimsOf, type Check, textAt } from './check.ts';
 
 interface Named {
   name: string | null;
@@ -17,7 +18,7 @@ function repeated(named: readonly Named[], message: (name: string) => string): P
     if (name === null) return [];
     const isRepeated = seen.has(name);
     seen.add(name);
-    return isRepeated ? [problem('duplicate', path, message(name))] : [];
+    return isRepeated ? [errorAt('duplicate', path, message(name))] : [];
   });
 }
 
@@ -37,14 +38,9 @@ export const documentKindsDiffer: Check = (tree) =>
       `A document of kind ${shown(kind)} is asked for already, and the two would be written to one file. Keep one; formats lists its formats.`,
   );
 
-export const referenceIdsDiffer: Check = (tree, references) => {
-  const isInFile = typeof childOf(tree, 'references') === 'string';
-  return repeated(
-    (references ?? []).map(({ id }, index) => ({
-      name: id,
-      path: isInFile ? ['references'] : ['references', index, 'id'],
-    })),
+export const referenceIdsDiffer: Check = (_tree, references) =>
+  repeated(
+    (references ?? []).map(({ id }, index) => ({ name: id, path: ['references', index, 'id'] })),
     (id) =>
       `Two references have the id ${shown(id)}. Give each an id of its own, so that a citation names one.`,
   );
-};

@@ -1,9 +1,10 @@
 /** Whether each aim says what its `find` needs: the target, and the number of people. */
 
+import { errorAt } from '../error-at.ts';
 import { listed } from '../shown.ts';
 import type { Find } from '../study.ts';
 import { childOf, isGroup } from '../tree.ts';
-import { aimsOf, type Check, numberAt, problem, textAt } from './check.ts';
+import { aimsOf, type Check, numberAt, textAt } from './check.ts';
 
 /** What each find is called in a sentence. */
 const SOUGHT: Readonly<Record<Find, string>> = {
@@ -21,7 +22,7 @@ export const powerIsStatedWhereNeeded: Check = (tree) =>
     if (!isTest || !isGroup(criteria) || Object.hasOwn(criteria, 'power')) return [];
     if (find !== 'sample-size' && find !== 'detectable-effect') return [];
     const message = `The key "power" is missing. ${capital(SOUGHT[find])} follows from a target power: state it, such as 0.9.`;
-    return [problem('missing-key', [...path, 'criteria', 'power'], message)];
+    return [errorAt('missing-key', [...path, 'criteria', 'power'], message)];
   });
 
 export const evaluableIsNotSoughtAndGiven: Check = (tree) =>
@@ -29,7 +30,7 @@ export const evaluableIsNotSoughtAndGiven: Check = (tree) =>
     if (textAt(aim, 'find') !== 'sample-size' || numberAt(aim, 'evaluable') === null) return [];
     const others = (method?.finds ?? []).filter((find) => find !== 'sample-size').map((find) => SOUGHT[find]);
     const message = `The number analysed is given, and find asks for it. Remove evaluable${others.length > 0 ? `, or find ${listed(others, 'or')} at that number` : ''}.`;
-    return [problem('evaluable-given', [...path, 'evaluable'], message)];
+    return [errorAt('evaluable-given', [...path, 'evaluable'], message)];
   });
 
 export const numberAnalysedIsKnown: Check = (tree) => {
@@ -43,7 +44,7 @@ export const numberAnalysedIsKnown: Check = (tree) => {
     if (find === null || !method?.finds.includes(find as Find) || childOf(aim, 'evaluable') !== undefined)
       return [];
     const message = `The number of people is missing: ${SOUGHT[find as Find]} depends on it. Give evaluable here or sample.maximum, or let an aim find the sample size.`;
-    return [problem('missing-key', [...path, 'evaluable'], message)];
+    return [errorAt('missing-key', [...path, 'evaluable'], message)];
   });
 };
 
@@ -53,7 +54,7 @@ export const evaluableFitsTheSample: Check = (tree) => {
     const evaluable = numberAt(aim, 'evaluable');
     if (maximum === null || evaluable === null || evaluable <= maximum) return [];
     const message = `Found ${evaluable} analysed, but sample.maximum is ${maximum}: no more can be analysed than take part. Correct one of the two.`;
-    return [problem('evaluable-above-maximum', [...path, 'evaluable'], message)];
+    return [errorAt('evaluable-above-maximum', [...path, 'evaluable'], message)];
   });
 };
 

@@ -1,10 +1,11 @@
 /** Numbers that must stand in an order. */
 
 import { formOf } from '../effect-form.ts';
+import { errorAt } from '../error-at.ts';
 import { formatPath } from '../path.ts';
 import type { Range } from '../study.ts';
 import { childOf, entriesOf, isGroup } from '../tree.ts';
-import { aimsOf, type Check, numberAt, problem, textAt } from './check.ts';
+import { aimsOf, type Check, numberAt, textAt } from './check.ts';
 import { writtenQuantities } from './written-quantities.ts';
 
 export const valueLiesInItsRange: Check = (tree) =>
@@ -16,11 +17,11 @@ export const valueLiesInItsRange: Check = (tree) =>
     const found = [];
     if (low !== null && low > value) {
       const message = `Found low ${low} above the value ${value}. low is the lower end of what is plausible: give at most the value.`;
-      found.push(problem('range', [...path, 'low'], message));
+      found.push(errorAt('range', [...path, 'low'], message));
     }
     if (high !== null && high < value) {
       const message = `Found high ${high} below the value ${value}. high is the upper end of what is plausible: give at least the value.`;
-      found.push(problem('range', [...path, 'high'], message));
+      found.push(errorAt('range', [...path, 'high'], message));
     }
     return found;
   });
@@ -32,7 +33,7 @@ export const powerExceedsAlpha: Check = (tree) =>
     const power = numberAt(criteria, 'power');
     if (alpha === null || power === null || power > alpha) return [];
     const message = `Found a target power of ${power} at alpha ${alpha}, but power must be larger than alpha, which the test reaches with no effect at all. Check both.`;
-    return [problem('power-below-alpha', [...path, 'criteria', 'power'], message)];
+    return [errorAt('power-below-alpha', [...path, 'criteria', 'power'], message)];
   });
 
 /** `sensitivity.effects` are values of each aim's effect, in the form in which that aim states it. */
@@ -46,7 +47,7 @@ export const askedEffectsArePossible: Check = (tree) =>
       const leading = method.quantities.find(({ key }) => key === form?.keys[0]);
       if (!leading || isIn(effect, leading.range)) return [];
       const message = `Found ${effect}, which the effect of ${formatPath(path)}, stated as ${leading.title}, cannot be. Give values in that form.`;
-      return [problem('not-allowed', ['sensitivity', 'effects', index], message)];
+      return [errorAt('not-allowed', ['sensitivity', 'effects', index], message)];
     });
   });
 
@@ -66,6 +67,6 @@ export const askedPowersArePossible: Check = (tree) => {
         ? ` Is ${target} % meant? Then write ${Number((target / 100).toPrecision(12))}.`
         : '';
     const message = `Found ${target}, but a target power must be less than 1.${hint}`;
-    return [problem('not-allowed', ['sensitivity', 'targets', index], message)];
+    return [errorAt('not-allowed', ['sensitivity', 'targets', index], message)];
   });
 };

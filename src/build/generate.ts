@@ -6,6 +6,7 @@ import { fileURLToPath } from 'node:url';
 import { assembleResultSchema, assembleSpecSchema } from './assemble-schema.ts';
 import { GENERATED, literal, writeFolder, writeIfChanged } from './generated-file.ts';
 import { readSchemaSources } from './schema-sources.ts';
+import { writePageStyle, writeReferences } from './write-assets.ts';
 import { writeCatalogue, writeNewSpecs, writeSourceKeys, writeVersion } from './write-catalogue.ts';
 import { inputsOfMethods, writeInputs } from './write-inputs.ts';
 import { writeReference } from './write-reference.ts';
@@ -40,6 +41,8 @@ const files = new Map<string, string>([
   ['templates.ts', writeTemplates(root, note)],
   ['new-specs.ts', writeNewSpecs(names, sources.starters, note)],
   ['source-keys.ts', writeSourceKeys(root, note)],
+  ['references.ts', writeReferences(root)],
+  ['page-style.ts', writePageStyle(root)],
   ['version.ts', writeVersion(root)],
 ]);
 if (result) {

@@ -61,6 +61,7 @@ export function renderDocument(
             title: `${view.title}: ${report.study.title}`,
             kind,
             bodyHtml: toHtml(markdown, new Map(figures.map(({ name, svg }) => [name, svg]))),
+            overrides,
           });
     const name = `${kind}.${format === 'markdown' ? 'md' : 'html'}`;
     const shown =

@@ -2,7 +2,8 @@
 
 import { source } from '../sources/sources.ts';
 import { apaEntry } from './citations/apa.ts';
+import { plain } from './citations/markup.ts';
 
 export function sourceTitle(key: string): string {
-  return apaEntry(source(key)).replaceAll('*', '');
+  return apaEntry(source(key), '', plain);
 }

@@ -38,6 +38,7 @@ export interface RenderRequest {
 export function renderTemplate(request: RenderRequest): Rendering {
   const { template, view, citations, dropped, overrides } = request;
   const sentences: Sentence[] = [];
+  const said = new Set<string>();
   const handlebars = (runtime as unknown as typeof Handlebars).create();
   const all = { ...builtIn, ...overrides };
   for (const [path, compiled] of Object.entries(all)) {
@@ -47,7 +48,12 @@ export function renderTemplate(request: RenderRequest): Rendering {
     sentence(this: unknown, id: string, options: Handlebars.HelperOptions) {
       const { drop, reports } = options.hash as { drop?: number; reports?: string };
       sentences.push({ id, drop: drop ?? null, reports: reports?.split(' ') ?? [] });
-      return dropped.has(id) ? '' : `${oneLine(options.fn(this))} `;
+      if (dropped.has(id)) return '';
+      const text = oneLine(options.fn(this));
+      // What has been said of one aim need not be said again of the next.
+      if (drop !== undefined && said.has(text)) return '';
+      said.add(text);
+      return `${text} `;
     },
     paragraph(this: unknown, options: Handlebars.HelperOptions) {
       const text = oneLine(options.fn(this));
@@ -70,6 +76,13 @@ export function renderTemplate(request: RenderRequest): Rendering {
   return { markdown: tidy(render(view)), sentences };
 }
 
+/** A template that is whole in itself, such as the shell of the page: it holds no sentences and cites nothing. */
+export function renderWhole(path: string, view: object, overrides: TemplateSet): string {
+  const compiled = overrides[path] ?? builtIn[path];
+  if (compiled === undefined) throw new Error(`no template ${path}`);
+  return (runtime as unknown as typeof Handlebars).create().template(compiled as TemplateSpecification)(view);
+}
+
 type TemplateSpecification = Parameters<typeof Handlebars.template>[0];
 
 /** ` (Cohen, 1988)` after a phrase; `Cohen, 1988` inside a parenthesis of the template; `Cohen (1988)` in a sentence. */
@@ -77,9 +90,9 @@ function citationForm(form: unknown): 'parenthetical' | 'bare' | 'narrative' {
   return form === 'bare' || form === 'narrative' ? form : 'parenthetical';
 }
 
-/** Templates wrap where they like: white space inside a sentence is one space. */
+/** Templates wrap where they like: white space inside a sentence is one space. No-break spaces stay. */
 function oneLine(text: string): string {
-  return text.replace(/\s+/g, ' ').trim();
+  return text.replace(/[ \t\r\n]+/g, ' ').trim();
 }
 
 /** At most one blank line, one line feed at the end. */

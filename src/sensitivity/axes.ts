@@ -5,6 +5,8 @@ import type { Quantity } from '../spec/study.ts';
 
 /** Where no range is stated: multiples of the value. */
 const MULTIPLES = [0.5, 0.75, 1, 1.25, 1.5];
+/** The same where an evaluation takes long. */
+const FEW_MULTIPLES = [0.75, 1, 1.25];
 /** Powers that protocols ask for; common practice, no source. */
 const POWERS = [0.8, 0.85, 0.9, 0.95];
 
@@ -12,21 +14,27 @@ const POWERS = [0.8, 0.85, 0.9, 0.95];
 const LOSS_STEP = 0.05;
 
 /** Ascending, the planned value always among them, each within the range its key allows. */
-export function effectAxis(quantity: Quantity, asked: readonly number[] | null): number[] {
+export function effectAxis(plan: AimPlan, quantity: Quantity, asked: readonly number[] | null): number[] {
   if (asked !== null) return ascending([...asked, quantity.value].filter((x) => within(quantity, x)));
   const { value, low, high } = quantity;
+  const isCostly = plan.method.isCostly === true;
   if (low === null && high === null) {
-    return ascending(MULTIPLES.map((multiple) => tidy(value * multiple)).filter((x) => within(quantity, x)));
+    return ascending(
+      (isCostly ? FEW_MULTIPLES : MULTIPLES)
+        .map((multiple) => tidy(value * multiple))
+        .filter((x) => within(quantity, x)),
+    );
   }
   const ends = [low, high].filter((end) => end !== null);
-  return ascending([value, ...ends.flatMap((end) => [end, tidy((end + value) / 2)])]);
+  return ascending([value, ...ends.flatMap((end) => (isCostly ? [end] : [end, tidy((end + value) / 2)]))]);
 }
 
 /** Target powers above alpha, or widths around the wanted one. */
 export function targetAxis(plan: AimPlan, asked: readonly number[] | null): number[] {
   const target = plan.target ?? 0.8;
   if (plan.method.achieves === 'width') {
-    return ascending([target, ...(asked ?? MULTIPLES.map((multiple) => tidy(target * multiple)))]);
+    const multiples = plan.method.isCostly === true ? FEW_MULTIPLES : MULTIPLES;
+    return ascending([target, ...(asked ?? multiples.map((multiple) => tidy(target * multiple)))]);
   }
   const powers = (asked ?? POWERS).filter((power) => power < 1 && power > plan.aim.criteria.alpha);
   return ascending(plan.target === null ? powers : [target, ...powers]);

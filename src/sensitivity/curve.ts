@@ -16,17 +16,21 @@ export interface Curve {
   hasBand: boolean;
 }
 
-/** Enough for a smooth line at 12 cm. */
+/** Enough for a smooth line at 12 cm; fewer where an evaluation takes long. */
 const POINTS = 48;
+const COSTLY_POINTS = 16;
+/** The curve begins at this share of the planned number: below it nobody would plan. */
+const FIRST_SHARE = 0.2;
 
 export function powerCurve(plan: AimPlan): Curve | null {
   const quantity = leadingQuantity(plan);
   if (quantity === null || plan.effect === null) return null;
   const { effect, calculation } = plan;
-  const first = calculation.smallestN;
+  const first = Math.max(calculation.smallestN, Math.round(plan.planned.n * FIRST_SHARE));
+  const count = plan.method.isCostly === true ? COSTLY_POINTS : POINTS;
   const last = Math.max(first + 10, Math.ceil(plan.planned.n * 1.8));
   const numbers = new Set(
-    Array.from({ length: POINTS }, (_, index) => Math.round(first + ((last - first) * index) / (POINTS - 1))),
+    Array.from({ length: count }, (_, index) => Math.round(first + ((last - first) * index) / (count - 1))),
   );
   numbers.add(plan.planned.n);
   const at = (n: number, value: number | null) =>

@@ -13,6 +13,8 @@ export interface Limit {
   /** The value at which the floor is met exactly; null when no admissible value breaks it, or the plan is
    *  already below it. */
   value: number | null;
+  /** Number analysed at which the floor is met, for a loss; null for a quantity of the aim. */
+  left: number | null;
   /** Why there is no value. */
   reason: 'never-breaks' | 'already-below' | null;
 }
@@ -48,7 +50,7 @@ function quantityLimit(plan: AimPlan, quantity: Quantity, floor: number): Limit 
   const { n } = plan.planned;
   const achieved = plan.planned.achieved;
   if (achieved === null || !meets(plan.method, achieved, floor))
-    return { floor, value: null, reason: 'already-below' };
+    return { floor, value: null, left: null, reason: 'already-below' };
   const excess = (value: number) => {
     const at = achievedWith(plan, n, { [quantity.key]: value });
     return at === null ? null : plan.method.achieves === 'power' ? at - floor : floor - at;
@@ -60,9 +62,14 @@ function quantityLimit(plan: AimPlan, quantity: Quantity, floor: number): Limit 
     if (near === null || near >= (plan.method.achieves === 'power' ? planned : -planned)) continue;
     const broken = firstBroken(quantity.value, end, excess);
     if (broken === null) continue;
-    return { floor, value: findRoot((x) => excess(x) ?? 0, quantity.value, broken), reason: null };
+    return {
+      floor,
+      value: findRoot((x) => excess(x) ?? 0, quantity.value, broken),
+      left: null,
+      reason: null,
+    };
   }
-  return { floor, value: null, reason: 'never-breaks' };
+  return { floor, value: null, left: null, reason: 'never-breaks' };
 }
 
 /** A thousand times the planned value stands for "without limit". */
@@ -79,26 +86,28 @@ function endsOf({ value, range }: Quantity): number[] {
 }
 
 /** Walk from the planned value towards `end` in steps that shrink geometrically near it; the first place where the
- *  floor is broken, or null when it holds all the way. */
+ *  floor is broken, or null when it holds all the way or things get better again. */
 function firstBroken(from: number, end: number, excess: (value: number) => number | null): number | null {
+  let before = Number.POSITIVE_INFINITY;
   for (let step = 1; step <= 60; step += 1) {
     const x = end + (from - end) * 0.7 ** step;
     const at = excess(x);
-    if (at === null) return null;
+    if (at === null || at > before) return null;
     if (at < 0) return x;
+    before = at;
   }
   return null;
 }
 
 /** People come whole: the largest proportion that leaves the number needed for the floor. */
 function lossLimit(plan: AimPlan, study: StudyPlan, quantity: Quantity, floor: number): Limit {
-  if (plan.effect === null) return { floor, value: null, reason: 'already-below' };
+  if (plan.effect === null) return { floor, value: null, left: null, reason: 'already-below' };
   const needed = requiredOrNull(plan, plan.effect, floor);
   const kept = study.study.sample.losses
     .filter((loss) => loss.proportion.path !== quantity.path)
     .reduce((product, loss) => product * (1 - loss.proportion.value), study.enrol);
   if (needed === null || needed > kept * (1 - quantity.value) + 1e-9) {
-    return { floor, value: null, reason: 'already-below' };
+    return { floor, value: null, left: null, reason: 'already-below' };
   }
-  return { floor, value: 1 - needed / kept, reason: null };
+  return { floor, value: 1 - needed / kept, left: needed, reason: null };
 }

@@ -19,7 +19,7 @@ export interface PowerTable {
 export function powerTable(plan: AimPlan, study: StudyPlan): PowerTable | null {
   const quantity = leadingQuantity(plan);
   if (quantity === null) return null;
-  const effects = effectAxis(quantity, study.study.sensitivity.effects);
+  const effects = effectAxis(plan, quantity, study.study.sensitivity.effects);
   const plannedLoss = overallLoss(proportionsOf(study.study.sample.losses));
   const losses = lossAxis(study, plannedLoss);
   const evaluable = losses.map((loss) =>

@@ -19,7 +19,7 @@ export interface RequiredTable {
 export function requiredTable(plan: AimPlan, { study }: StudyPlan): RequiredTable | null {
   const quantity = leadingQuantity(plan);
   if (quantity === null) return null;
-  const effects = effectAxis(quantity, study.sensitivity.effects);
+  const effects = effectAxis(plan, quantity, study.sensitivity.effects);
   const targets = targetAxis(plan, study.sensitivity.targets);
   return {
     quantity,

@@ -29,7 +29,7 @@ export function bind(
     method: name,
     inputs,
     criteria,
-    find: 'effect' in inputs || !('power' in criteria) ? 'sample-size' : 'detectable-effect',
+    find: 'power' in criteria ? 'detectable-effect' : 'sample-size',
   };
   const study = normalise({ samplecase: 1, study: words, aims: [aim] } as unknown as Spec, [], 'test');
   const method = methods[name];

@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import {
   requireBetween,
+  requireFinite,
   requireNonNegative,
   requirePositive,
   requireProbability,
@@ -16,6 +17,7 @@ describe('a refusal names function, argument, value and domain', () => {
       () => requirePositive('f', 'x', Infinity),
       'RangeError: f: x is Infinity; a finite number above 0 is needed',
     ],
+    [() => requireFinite('f', 'x', -Infinity), 'RangeError: f: x is -Infinity; a finite number is needed'],
     [() => requireNonNegative('f', 'x', -1), 'RangeError: f: x is -1; a finite number from 0 is needed'],
     [
       () => requireNonNegative('f', 'x', Number.NaN),
@@ -38,6 +40,7 @@ describe('a refusal names function, argument, value and domain', () => {
 
   test('what lies in the domain passes, ends included', () => {
     expect(() => {
+      requireFinite('f', 'x', -1e308);
       requirePositive('f', 'x', 1e-300);
       requireNonNegative('f', 'x', 0);
       requireBetween('f', 'x', 2, -1, 2);

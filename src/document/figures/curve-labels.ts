@@ -4,8 +4,16 @@ import { formatCount } from '../numbers.ts';
 import type { Scale } from './axis.ts';
 import { fitted, type Label, LINE_HEIGHT, labelElement, stacked } from './label.ts';
 import type { Measure } from './measure.ts';
-import { type Box, type Obstacles, type Placed, type Point, placeLabel, type Segment } from './place.ts';
-import type { PowerCurveData, PowerCurvePoint } from './power-curve.ts';
+import {
+  type Anchor,
+  type Box,
+  type Obstacles,
+  type Placed,
+  type Point,
+  placeLabel,
+  type Segment,
+} from './place.ts';
+import type { PowerCurveData, PowerCurvePoint } from './power-curve-data.ts';
 import { lineElement, SOFT_INK } from './svg.ts';
 
 export interface Drawing {
@@ -22,6 +30,10 @@ const INSET = 5;
 /** From the target line to the label above and below it; letters leave more room above themselves. */
 const ABOVE_LINE = 4;
 const BELOW_LINE = 3.5;
+/** Above the plot, short of the name of the axis. */
+const INTO_HEAD = 12;
+/** Of the points of the band, as many as are looked at: neighbours are alike. */
+const EVERY = 4;
 
 export function curveLabels(data: PowerCurveData, measure: Measure, drawing: Drawing): string {
   const { planned, target, band, points } = data;
@@ -34,7 +46,9 @@ export function curveLabels(data: PowerCurveData, measure: Measure, drawing: Dra
   };
   const obstacles = obstaclesOf(data, drawing);
   const parts: string[] = [];
-  const put = (label: Label, { box, leader }: Placed) => {
+  const put = (label: Label, place: Placed | null) => {
+    if (place === null) throw new RangeError(`label '${label.lines.join(' ')}' has no room in the plot`);
+    const { box, leader } = place;
     obstacles.boxes.push(box);
     if (leader !== null) {
       obstacles.lines.push(leader);
@@ -45,34 +59,30 @@ export function curveLabels(data: PowerCurveData, measure: Measure, drawing: Dra
   };
 
   const study = stacked([`planned n ${formatCount(planned.n)}`, measure.achieved]);
-  put(study, placeLabel(study, dot, inside, obstacles));
+  put(study, placeLabel(study, [{ ...dot, shortfall: 0 }], inside, obstacles));
   if (target !== null && measure.target !== null) {
-    const label = fitted(measure.target, inside.width / 2, 1);
-    const end = { x: plot.x + plot.width, y: y(target) };
-    const strips = [y(target) - LINE_HEIGHT - ABOVE_LINE, y(target) + BELOW_LINE]
-      .filter((top) => top >= 0 && top + LINE_HEIGHT <= plot.y + plot.height)
-      .map((top) => ({ ...inside, y: top, height: LINE_HEIGHT }));
-    // It stands at its line wherever it stands along it: no leader.
-    const place = cheapest(strips.map((strip) => placeLabel(label, end, strip, obstacles)));
-    if (place !== null) put(label, { ...place, leader: null });
+    const label = stacked([measure.target]);
+    put(label, alongLine(label, y(target), inside, obstacles));
   }
-  if (band !== null) {
+  const anchors = band === null ? [] : bandAnchors(points, drawing);
+  if (band !== null && anchors.length > 0) {
     const label = fitted(band, inside.width * 0.42, 4);
-    const places = bandAnchors(points, drawing).map(({ at, shortfall }) => {
-      const place = placeLabel(label, at, inside, obstacles);
-      return { ...place, cost: place.cost + shortfall };
-    });
-    const place = cheapest(places);
-    if (place !== null) put(label, place);
+    put(label, placeLabel(label, anchors, inside, obstacles));
   }
   return parts.join('');
 }
 
-function cheapest(places: readonly Placed[]): Placed | null {
-  return places.reduce<Placed | null>(
-    (best, one) => (best === null || one.cost < best.cost ? one : best),
-    null,
-  );
+/** Above or below a horizontal line, near its right end if that is free. It names its line without a leader. */
+function alongLine(label: Label, level: number, inside: Box, obstacles: Obstacles): Placed | null {
+  const end = { x: inside.x + inside.width, y: level, shortfall: 0 };
+  const places = [level - LINE_HEIGHT - ABOVE_LINE, level + BELOW_LINE]
+    .filter((top) => top >= inside.y - INTO_HEAD && top + LINE_HEIGHT <= inside.y + inside.height)
+    .map((top) => placeLabel(label, [end], { ...inside, y: top, height: LINE_HEIGHT }, obstacles))
+    .filter((place) => place !== null);
+  const [first, second] = places;
+  if (first === undefined) return null;
+  const place = second !== undefined && second.cost < first.cost ? second : first;
+  return { ...place, leader: null };
 }
 
 function obstaclesOf(
@@ -97,16 +107,16 @@ function obstaclesOf(
   };
 }
 
-/** Places to point at, halfway between curve and edge, and how much taller the band is where it is tallest. */
-function bandAnchors(points: readonly PowerCurvePoint[], { plot, x, y }: Drawing) {
-  const halves = points.flatMap(({ n, value, low, high }) =>
-    low === null || high === null
+/** Points to name, halfway between curve and edge, and how much taller the band is where it is tallest. */
+function bandAnchors(points: readonly PowerCurvePoint[], { plot, x, y }: Drawing): Anchor[] {
+  const halves = points.flatMap(({ n, value, low, high }, index) =>
+    low === null || high === null || index % EVERY !== 0
       ? []
       : [low, high].map((edge) => {
           const [a, b] = [Math.max(y(value), plot.y), Math.max(y(edge), plot.y)];
-          return { at: { x: x(n), y: (a + b) / 2 }, height: Math.abs(a - b) };
+          return { x: x(n), y: (a + b) / 2, height: Math.abs(a - b) };
         }),
   );
   const tallest = Math.max(...halves.map(({ height }) => height));
-  return halves.map(({ at, height }) => ({ at, shortfall: tallest - height }));
+  return halves.map(({ height, ...point }) => ({ ...point, shortfall: tallest - height }));
 }

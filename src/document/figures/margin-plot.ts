@@ -152,7 +152,7 @@ function fullText({ label, unit, plannedText, limits, low, high }: MarginRow): s
 function key(top: number): string {
   const middle = top + FONT_SIZE / 2 + 1;
   const text = (words: string, x: number) =>
-    labelElement(fitted(words, FIGURE_WIDTH, 1), x, top, { fill: SOFT_INK });
+    labelElement(fitted(words, FIGURE_WIDTH - x, 1), x, top, { fill: SOFT_INK });
   return element(
     'g',
     {},
@@ -162,7 +162,7 @@ function key(top: number): string {
       rangeBar(90, 24, middle),
       text('stated range', 120),
       lineElement(232, middle - TICK, 232, middle + TICK, { stroke: INK, 'stroke-width': 1.25 }),
-      text('limit beyond which the floor is missed', 240),
+      text('limit: falls short beyond it', 240),
     ].join(''),
   );
 }

@@ -2,7 +2,7 @@
 
 import { formatPower, formatProbability, formatSignificant } from '../numbers.ts';
 import { fromZero, roundTicks, type Tick } from './axis.ts';
-import type { PowerCurveData } from './power-curve.ts';
+import type { PowerCurveData } from './power-curve-data.ts';
 
 export interface Measure {
   domain: [number, number];
@@ -39,9 +39,11 @@ function twoDecimals(text: string): string {
   return /^\.\d$/.test(text) ? `${text}0` : text;
 }
 
-function widthMeasure({ points, planned, target }: PowerCurveData): Measure {
+function widthMeasure({ points, planned, target, band }: PowerCurveData): Measure {
   const matters = Math.max(planned.value, target ?? 0);
-  const values = points.flatMap(({ value, low, high }) => [value, low ?? value, high ?? value]);
+  const values = points.flatMap(({ value, low, high }) =>
+    band === null ? [value] : [value, low ?? value, high ?? value],
+  );
   const domain = fromZero(Math.min(Math.max(...values, matters), TALLEST * matters));
   return {
     domain,

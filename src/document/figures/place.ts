@@ -12,6 +12,11 @@ export interface Point {
   y: number;
 }
 
+/** A point that a label may name, and how much worse a one it is than the best of them. */
+export interface Anchor extends Point {
+  shortfall: number;
+}
+
 export interface Segment {
   from: Point;
   to: Point;
@@ -32,54 +37,81 @@ export interface Placed {
   cost: number;
 }
 
-const STEP = 4;
+const STEP = { x: 6, y: 4 };
 const CLEARANCE = 3;
 /** Beyond this distance a label needs a leader to show what it names. */
 const NEAR = 9;
 const COST = { box: 100_000, leaderOverBox: 20_000, line: 400, leaderOverLine: 25 };
 
 /**
- * Searches a grid of places inside `area`, in a fixed order, so that the same data give the same figure.
- * `size` has to fit into `area`.
+ * Searches a grid of places inside `area`, the nearest first, so that the same data give the same figure.
+ * `anchors` are the points that the label may name; null where none is given or the area is too small.
  */
 export function placeLabel(
   size: { width: number; height: number },
-  anchor: Point,
+  anchors: readonly Anchor[],
   area: Box,
   obstacles: Obstacles,
-): Placed {
+): Placed | null {
   let best: Placed | null = null;
-  let least = Number.POSITIVE_INFINITY;
-  for (let y = area.y; y <= area.y + area.height - size.height; y += STEP) {
-    for (let x = area.x; x <= area.x + area.width - size.width; x += STEP) {
-      const box = { x, y, ...size };
-      const end = nearestPoint(box, anchor);
-      const distance = Math.hypot(end.x - anchor.x, end.y - anchor.y);
-      if (distance >= least) continue;
-      const leader = distance > NEAR ? { from: end, to: anchor } : null;
-      const cost = distance + costOf(box, leader, obstacles);
-      if (cost < least) [best, least] = [{ box, leader, cost }, cost];
+  for (const { box, near } of nearestFirst(size, anchors, area)) {
+    if (best !== null && near >= best.cost) break;
+    const covered = coveredBy(box, obstacles);
+    for (const anchor of anchors) {
+      const distance = distanceOf(box, anchor);
+      const least = distance + anchor.shortfall + covered;
+      if (best !== null && least >= best.cost) continue;
+      const leader = distance > NEAR ? leaderOf(box, anchor) : null;
+      const cost = least + (leader === null ? 0 : crossedBy(leader, obstacles));
+      if (best === null || cost < best.cost) best = { box, leader, cost };
     }
-  }
-  if (best === null) {
-    throw new RangeError(
-      `size is ${size.width} × ${size.height}; it has to fit ${area.width} × ${area.height}`,
-    );
   }
   return best;
 }
 
-function costOf(box: Box, leader: Segment | null, { boxes, lines }: Obstacles): number {
+function nearestFirst({ width, height }: Omit<Box, 'x' | 'y'>, anchors: readonly Anchor[], area: Box) {
+  const places: { box: Box; near: number }[] = [];
+  for (let y = area.y; y <= area.y + area.height - height; y += STEP.y) {
+    for (let x = area.x; x <= area.x + area.width - width; x += STEP.x) {
+      const box = { x, y, width, height };
+      const costs = anchors.map((anchor) => distanceOf(box, anchor) + anchor.shortfall);
+      if (costs.length > 0) places.push({ box, near: Math.min(...costs) });
+    }
+  }
+  return places.sort((a, b) => a.near - b.near);
+}
+
+function distanceOf({ x, y, width, height }: Box, point: Point): number {
+  return Math.hypot(point.x - clamped(point.x, x, width), point.y - clamped(point.y, y, height));
+}
+
+function leaderOf({ x, y, width, height }: Box, to: Point): Segment {
+  return { from: { x: clamped(to.x, x, width), y: clamped(to.y, y, height) }, to: { x: to.x, y: to.y } };
+}
+
+function clamped(value: number, start: number, length: number): number {
+  return Math.min(Math.max(value, start), start + length);
+}
+
+function coveredBy(box: Box, { boxes, lines }: Obstacles): number {
   const roomy = grown(box, CLEARANCE);
-  const count = <T>(items: readonly T[], hit: (item: T) => boolean) => items.filter(hit).length;
   return (
     COST.box * count(boxes, (other) => overlap(roomy, other)) +
-    COST.line * count(lines, (line) => crosses(line, roomy)) +
-    (leader === null
-      ? 0
-      : COST.leaderOverBox * count(boxes, (other) => crosses(leader, other) && !holds(other, leader.to)) +
-        COST.leaderOverLine * count(lines, (line) => meet(leader, line)))
+    COST.line * count(lines, (line) => crosses(line, roomy))
   );
+}
+
+function crossedBy(leader: Segment, { boxes, lines }: Obstacles): number {
+  return (
+    COST.leaderOverBox * count(boxes, (other) => crosses(leader, other) && !holds(other, leader.to)) +
+    COST.leaderOverLine * count(lines, (line) => meet(leader, line))
+  );
+}
+
+function count<T>(items: readonly T[], hit: (item: T) => boolean): number {
+  let sum = 0;
+  for (const item of items) if (hit(item)) sum++;
+  return sum;
 }
 
 export function overlap(a: Box, b: Box): boolean {
@@ -88,6 +120,8 @@ export function overlap(a: Box, b: Box): boolean {
 
 /** Whether a segment enters a box: clipped against its four sides (Liang and Barsky, 1984). */
 export function crosses({ from, to }: Segment, box: Box): boolean {
+  if (Math.max(from.x, to.x) < box.x || Math.min(from.x, to.x) > box.x + box.width) return false;
+  if (Math.max(from.y, to.y) < box.y || Math.min(from.y, to.y) > box.y + box.height) return false;
   const [dx, dy] = [to.x - from.x, to.y - from.y];
   let [enter, leave] = [0, 1];
   for (const [slope, room] of [
@@ -105,9 +139,11 @@ export function crosses({ from, to }: Segment, box: Box): boolean {
 }
 
 function meet(a: Segment, b: Segment): boolean {
-  const side = ({ from, to }: Segment, p: Point) =>
-    Math.sign((to.x - from.x) * (p.y - from.y) - (to.y - from.y) * (p.x - from.x));
   return side(a, b.from) !== side(a, b.to) && side(b, a.from) !== side(b, a.to);
+}
+
+function side({ from, to }: Segment, p: Point): number {
+  return Math.sign((to.x - from.x) * (p.y - from.y) - (to.y - from.y) * (p.x - from.x));
 }
 
 /** The mark that a leader points at is not in its way. */
@@ -117,8 +153,4 @@ function holds({ x, y, width, height }: Box, point: Point): boolean {
 
 function grown({ x, y, width, height }: Box, by: number): Box {
   return { x: x - by, y: y - by, width: width + 2 * by, height: height + 2 * by };
-}
-
-function nearestPoint({ x, y, width, height }: Box, { x: px, y: py }: Point): Point {
-  return { x: Math.min(Math.max(px, x), x + width), y: Math.min(Math.max(py, y), y + height) };
 }

@@ -6,29 +6,8 @@ import { bottomAxis, leftAxis, linearScale, roundTicks, type Scale, type Tick } 
 import { curveLabels } from './curve-labels.ts';
 import { fitted, labelElement, textWidth } from './label.ts';
 import { measureOf } from './measure.ts';
+import type { PowerCurveData, PowerCurvePoint } from './power-curve-data.ts';
 import { element, FIGURE_WIDTH, frame, HAIRLINE, INK, lineElement, SOFT_INK } from './svg.ts';
-
-export interface PowerCurvePoint {
-  n: number;
-  value: number;
-  /** With the effect at the ends of its stated range; null where the end is not stated or reaches nothing. */
-  low: number | null;
-  high: number | null;
-}
-
-export interface PowerCurveData {
-  prefix: string;
-  title: string;
-  description: string;
-  xLabel: string;
-  yLabel: string;
-  /** In the order of `n`. */
-  points: PowerCurvePoint[];
-  target: number | null;
-  planned: { n: number; value: number };
-  /** What the band shows; null draws no band. */
-  band: string | null;
-}
 
 const PLOT_HEIGHT = 240;
 const RIGHT = 20;

@@ -57,8 +57,8 @@ function outcomeLines(dialect: Dialect, outcome: Outcome, plan: AimPlan, study: 
 
 function marginLines(dialect: Dialect, { plan, margins }: AimSensitivity, study: StudyPlan): string[] {
   const name = plan.method.achieves;
-  const limits = margins.flatMap(({ quantity, stage, limits: ofRow }) =>
-    ofRow.flatMap(({ value, floor }) => (value === null ? [] : [{ quantity, stage, value, floor }])),
+  const limits = margins.flatMap(({ quantity, limits: ofRow }) =>
+    ofRow.flatMap(({ value, floor, left }) => (value === null ? [] : [{ quantity, value, floor, left }])),
   );
   if (limits.length === 0) return [];
   return [
@@ -66,16 +66,13 @@ function marginLines(dialect: Dialect, { plan, margins }: AimSensitivity, study:
       `Margins: at the limit of an assumption the ${name} is at its floor; at the limit of a loss`,
     ),
     dialect.comment('just as many are left as the floor needs'),
-    ...limits.flatMap(({ quantity, stage, value, floor }) => {
-      if (stage === null) {
+    ...limits.flatMap(({ quantity, value, floor, left }) => {
+      if (left === null) {
         const effect = dialect.call('effect', [], { [quantity.key]: value });
         return [dialect.show(dialect.call(name, [dialect.number(plan.planned.n), effect]), printed(floor))];
       }
       const losses = study.study.sample.losses.map(({ proportion }) =>
         proportion.path === quantity.path ? value : proportion.value,
-      );
-      const left = Math.floor(
-        Number(losses.reduce((kept, loss) => kept * (1 - loss), study.enrol).toFixed(6)),
       );
       return [
         ...requiredLines(dialect, plan, { moved: {}, target: floor, n: left }),

@@ -98,7 +98,7 @@ export function aimView(sensitivity: AimSensitivity, study: StudyPlan, words: St
       effect === null || target === null
         ? []
         : calculation.alternatives(effect, target).map((one) => ({ ...one, n: formatCount(one.n) })),
-    doubt: doubtSentences(sensitivity, study, words),
+    doubt: doubtSentences(sensitivity, words),
     tables: { ...arithmeticTables(sensitivity, words), ...bySensitivity },
     sensitivityTables: Object.values(bySensitivity).filter((table) => table !== null),
     figures: figureReferences(sensitivity, words),

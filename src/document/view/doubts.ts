@@ -1,6 +1,5 @@
 /** What happens if an assumption is off, in one or two sentences an aim. */
 
-import type { StudyPlan } from '../../plan/plan.ts';
 import type { RangeRow } from '../../sensitivity/ranges.ts';
 import type { AimSensitivity } from '../../sensitivity/sensitivity.ts';
 import type { Study } from '../../spec/study.ts';
@@ -25,10 +24,10 @@ export interface DoubtWords {
   assurance: string | null;
 }
 
-export function doubtSentences(sensitivity: AimSensitivity, study: StudyPlan, words: Study): DoubtWords {
+export function doubtSentences(sensitivity: AimSensitivity, words: Study): DoubtWords {
   return {
     whatIf: whatIf(sensitivity, words),
-    margin: margin(sensitivity, study, words),
+    margin: margin(sensitivity, words),
     worst: worst(sensitivity, words),
     assurance: assurance(sensitivity, words),
   };
@@ -74,24 +73,22 @@ function achievedPhrase(plan: AimSensitivity['plan'], achieved: number | null): 
 }
 
 /** Where each assumption breaks the highest floor that the plan still meets. */
-function margin(
-  { plan, margins }: AimSensitivity,
-  _study: StudyPlan,
-  { sample, aims }: Study,
-): string | null {
+function margin({ plan, margins }: AimSensitivity, { aims }: Study): string | null {
   const units = unitsOf(aims[plan.aim.index] ?? plan.aim);
   const floors = margins[0]?.limits.map(({ floor }) => floor) ?? [];
   const floor = floors.find((one) => one !== plan.target) ?? null;
   if (floor === null) return null;
   const clauses = margins.flatMap(({ quantity, stage, limits }) => {
     const limit = limits.find((one) => one.floor === floor);
-    if (limit === undefined || limit.value === null) return [];
-    const text =
-      stage === null
-        ? withUnit(computedNumber(limit.value, quantity.unit), unitText(quantity.unit, units))
-        : formatPercent(Number(limit.value.toPrecision(3)));
-    return [`the ${nameOf({ quantity, stage }, sample.losses)} at ${text}`];
+    if (stage !== null || limit === undefined || limit.value === null) return [];
+    const text = withUnit(computedNumber(limit.value, quantity.unit), unitText(quantity.unit, units));
+    return [`the ${quantity.title} at ${text}`];
   });
+  // Whatever the losses, they work through the number that is left.
+  const left = margins.flatMap(({ limits }) =>
+    limits.filter((one) => one.floor === floor && one.left !== null),
+  )[0]?.left;
+  if (left !== undefined && left !== null) clauses.push(`only ${formatCount(left)} analysed`);
   if (clauses.length === 0) return null;
   const falls =
     plan.method.achieves === 'power'

@@ -7,7 +7,7 @@
 
 import type { EffectForm, Values } from '../method.ts';
 import { contradiction } from './contradiction.ts';
-import { signOf, given } from './test-forms.ts';
+import { given, signOf } from './test-forms.ts';
 
 export type InteractionKind = 'continuous-continuous' | 'continuous-binary' | 'binary-binary';
 
@@ -53,8 +53,7 @@ const twoContinuous = differenceForm(
   ],
   (values) => {
     const scale =
-      (given(values, 'predictor_sd') * given(values, 'moderator_sd')) /
-      given(values, 'moderator_contrast');
+      (given(values, 'predictor_sd') * given(values, 'moderator_sd')) / given(values, 'moderator_contrast');
     return scale ** 2 * (1 + given(values, 'predictor_correlation') ** 2);
   },
   'predictor_sd * predictor_sd * moderator_sd * moderator_sd * (1 + predictor_correlation * predictor_correlation) / (moderator_contrast * moderator_contrast)',
@@ -123,11 +122,23 @@ function reliabilityExpression(kind: InteractionKind, keys: readonly string[]): 
   return `(${rho2} + ${product}) / (1 + ${rho2})`;
 }
 
+/** Whether any reliability is stated.
+ *  @param keys quantities the aim states */
+export function isAttenuated(keys: readonly string[]): boolean {
+  return keys.some((key) => key.endsWith('_reliability'));
+}
+
+/** The effect without error of measurement that is seen as f² `seen`; null when measurement is so poor that none is. */
+export function withoutError(seen: number, kind: InteractionKind, values: Values): number | null {
+  const kept = reliability(kind, values);
+  return kept > (1 - kept) * seen ? seen / (kept - (1 - kept) * seen) : null;
+}
+
 /** The form as it is seen through imperfect measurement: the share `rel` of what the product explains is still carried
  *  by it and the rest joins the residual, f²(seen) = rel·f²/(1 + (1 − rel)·f²).
  *  @param keys quantities the aim states */
 export function attenuated(form: EffectForm, kind: InteractionKind, keys: readonly string[]): EffectForm {
-  if (!keys.some((key) => key.endsWith('_reliability'))) return form;
+  if (!isAttenuated(keys)) return form;
   const rel = reliabilityExpression(kind, keys);
   return {
     ...form,
@@ -137,11 +148,11 @@ export function attenuated(form: EffectForm, kind: InteractionKind, keys: readon
       return (kept * f2) / (1 + (1 - kept) * f2);
     },
     fromEffect(seen, values) {
-      const kept = reliability(kind, values);
-      if (kept <= (1 - kept) * seen) {
+      const f2 = withoutError(seen, kind, values);
+      if (f2 === null) {
         contradiction('predictor_reliability', 'is too low: no true effect would be seen as this one.');
       }
-      return form.fromEffect(seen / (kept - (1 - kept) * seen), values);
+      return form.fromEffect(f2, values);
     },
     expression: `(${rel}) * (${form.expression}) / (1 + (1 - (${rel})) * (${form.expression}))`,
     inverse: form.inverse.replaceAll('f2', `(f2 / ((${rel}) - (1 - (${rel})) * f2))`),

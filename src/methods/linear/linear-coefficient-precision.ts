@@ -4,7 +4,7 @@ import type { LinearCoefficientPrecisionInputs } from '../../generated/spec.ts';
 import { normalUpperQuantile } from '../../numeric/distributions/normal.ts';
 import type { EffectForm, Method, Step, Values } from '../method.ts';
 import { coefficientWidth, type WidthDesign, widthSteps } from './coefficient-width.ts';
-import { MODEL_ASSUMPTIONS, SAMPLED_ASSUMPTION } from './linear-words.ts';
+import { INTERVAL_ASSUMPTIONS } from './linear-words.ts';
 import { given } from './test-forms.ts';
 
 /** Standard error that one person would give: σ/(σx·√(1 − R²x)). It leads by the residual SD. */
@@ -51,7 +51,7 @@ export const linearCoefficientPrecision: Method = {
       of: 'planning for a narrow interval of a coefficient, on average and with assurance',
     },
   ],
-  assumptions: [...MODEL_ASSUMPTIONS, SAMPLED_ASSUMPTION],
+  assumptions: INTERVAL_ASSUMPTIONS,
   rises: 'always',
   prepare(aim) {
     const inputs = aim.inputs as LinearCoefficientPrecisionInputs;

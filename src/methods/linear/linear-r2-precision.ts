@@ -3,12 +3,13 @@
 import { r2FromF2 } from '../../effects/effect-size.ts';
 import type { LinearR2PrecisionInputs } from '../../generated/spec.ts';
 import { normalUpperQuantile } from '../../numeric/distributions/normal.ts';
-import type { EffectForm, Method, Values } from '../method.ts';
+import { smallestInteger } from '../../numeric/solve/smallest-integer.ts';
+import type { Alternative, EffectForm, Method, Values } from '../method.ts';
 import { chosenForm, countsOf } from './chosen-form.ts';
 import { atAim } from './contradiction.ts';
-import { MODEL_ASSUMPTIONS, SAMPLED_ASSUMPTION } from './linear-words.ts';
-import { assuredWidth, expectedWidth, type R2Design } from './r2-interval.ts';
-import { r2IntervalSteps } from './r2-interval-steps.ts';
+import { INTERVAL_ASSUMPTIONS } from './linear-words.ts';
+import { assuredWidth, expectedWidth, type R2Design, widthAtMean } from './r2-interval.ts';
+import { r2IntervalSteps, widthAtMeanSteps } from './r2-interval-steps.ts';
 import { adjustedR2Form, f2Form, observedR2Form, r2Form } from './test-forms.ts';
 
 /** The forms of the test lead to f²; an interval is about R² itself. */
@@ -37,6 +38,39 @@ const ofAdjustedR2: EffectForm = {
   expression: 'adjusted_r2',
   inverse: 'r2',
 };
+
+/** Five residual degrees of freedom: with fewer the interval spans nearly everything whatever is observed, and its ends
+ *  come too near to 0 and 1 for the accuracy that is promised. */
+function smallestNumber({ predictors }: R2Design): number {
+  return predictors + 6;
+}
+
+/** The number by the definition of Kelley (2008; from memory): the width of the interval at the mean of R² in place of the
+ *  mean of the width. */
+function atMean(r2: number, width: number, design: R2Design): Alternative[] {
+  const widthWith = (n: number) => widthAtMean(r2, n, design);
+  try {
+    const n = smallestInteger(
+      (count) => widthWith(count) <= width,
+      design.predictors + 3,
+      LARGEST_N,
+      'always',
+    );
+    return [
+      {
+        key: 'at_mean',
+        description: 'with the width of the interval at the expected R² in place of the expected width',
+        n,
+        steps: (count) => widthAtMeanSteps(count, design, widthWith(count)),
+      },
+    ];
+  } catch (error) {
+    if (error instanceof RangeError) return [];
+    throw error;
+  }
+}
+
+const LARGEST_N = 1e7;
 
 export const linearR2Precision: Method = {
   name: 'linear-r2-precision',
@@ -68,7 +102,7 @@ export const linearR2Precision: Method = {
     { key: 'kelley2008', of: 'planning for a narrow interval of R², on average and with assurance' },
     { key: 'gatsonis1989', of: 'distribution of R² with sampled predictors' },
   ],
-  assumptions: [...MODEL_ASSUMPTIONS, SAMPLED_ASSUMPTION],
+  assumptions: INTERVAL_ASSUMPTIONS,
   isCostly: true,
   rises: 'always',
   prepare(aim) {
@@ -91,8 +125,7 @@ export const linearR2Precision: Method = {
       assurance === null ? expectedWidth(r2, n, design) : assuredWidth(assurance, r2, n, design);
     const stated = Object.fromEntries(Object.values(aim.quantities).map(({ key, value }) => [key, value]));
     return {
-      // Two residual degrees of freedom: with one the interval spans nearly everything whatever is observed.
-      smallestN: inputs.predictors + 3,
+      smallestN: smallestNumber(design),
       form,
       effect: form === null ? null : effectAt(stated),
       effectAt,
@@ -114,7 +147,7 @@ export const linearR2Precision: Method = {
           value,
         })),
       ],
-      alternatives: () => [],
+      alternatives: (r2, width) => atMean(r2, width, design),
     };
   },
 };

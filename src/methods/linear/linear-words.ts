@@ -29,6 +29,41 @@ export const MODEL_ASSUMPTIONS: readonly Assumption[] = [
   },
 ];
 
+/** The same for an interval, of which no power is spoken. */
+export const INTERVAL_ASSUMPTIONS: readonly Assumption[] = [
+  {
+    statement: 'observations are independent',
+    ifNot:
+      'clustered or repeated observations carry less information, and the interval is too narrow for its level',
+  },
+  {
+    statement: 'the relation is linear as modelled',
+    ifNot: 'the interval is about the best straight-line description, not about the relation itself',
+  },
+  {
+    statement: 'residuals have one variance',
+    ifNot: 'the interval does not have its nominal confidence unless robust standard errors are used',
+  },
+  {
+    statement: 'residuals are normal',
+    ifNot:
+      'confidence and width are approximate, closely so for a slope with many residual degrees of freedom',
+  },
+  {
+    statement: 'the model is fixed before the data are seen',
+    ifNot: 'an interval from a selected model covers less often than stated',
+  },
+  {
+    statement: 'predictors are measured without error',
+    ifNot: 'the interval is about the attenuated relation with the predictors as measured',
+  },
+  {
+    statement: 'sampled predictors are jointly normal',
+    ifNot:
+      'the width to be expected is approximate, and with outlying predictor values so is the interval of R²',
+  },
+];
+
 export const SAMPLED_ASSUMPTION: Assumption = {
   statement: 'sampled predictors are jointly normal',
   ifNot:

@@ -19,8 +19,10 @@ const EXCEEDANCE = {
   sum(dnbinom(j, (n - 1) / 2, 1 - r) * pbeta(q, k / 2 + j, v / 2, lower.tail = FALSE))
 }`,
     python: `def beyond(q, r):
-    j = np.arange(stats.nbinom.isf(1e-15, (n - 1) / 2, 1 - r) + 1) if r > 0 else np.arange(1)
-    return float(np.sum(stats.nbinom.pmf(j, (n - 1) / 2, 1 - r) * special.betaincc(k / 2 + j, v / 2, q)))`,
+    m = (n - 1) / 2
+    j = np.arange(int(m * r / (1 - r) + 9 * sqrt(m * r) / (1 - r) + 60 / (1 - r)))
+    weight = np.exp(special.gammaln(m + j) - special.gammaln(m) - special.gammaln(j + 1) + m * np.log1p(-r) + special.xlogy(j, r))
+    return float(np.sum(weight * special.betainc(v / 2, k / 2 + j, 1 - q)))`,
   },
   fixed: {
     r: `beyond <- function(q, r) {
@@ -30,8 +32,9 @@ const EXCEEDANCE = {
 }`,
     python: `def beyond(q, r):
     half = n * r / (1 - r) / 2
-    j = np.arange(stats.poisson.isf(1e-15, half) + 1) if r > 0 else np.arange(1)
-    return float(np.sum(stats.poisson.pmf(j, half) * special.betaincc(k / 2 + j, v / 2, q)))`,
+    j = np.arange(int(half + 9 * sqrt(half) + 60))
+    weight = np.exp(special.xlogy(j, half) - half - special.gammaln(j + 1))
+    return float(np.sum(weight * special.betainc(v / 2, k / 2 + j, 1 - q)))`,
   },
 } as const;
 
@@ -65,10 +68,13 @@ const ASSURED = {
 peak <- optimize(wide, c(0, 0.95), maximum = TRUE, tol = 1e-5)$maximum
 first <- cut(1 - 1e-10, r2)
 last <- cut(1e-10, r2)
-side <- function(w, end) if (wide(end) >= w) end else uniroot(function(q) wide(q) - w, c(end, peak), tol = 1e-11)$root
+side <- function(w, end) {
+  if (wide(end) >= w) return(end)
+  uniroot(function(q) wide(q) - w, sort(c(end, peak)), tol = 1e-11)$root
+}
 wider <- function(w) {
   a <- if (first >= peak) first else side(w, first)
-  b <- if (last <= peak) last else uniroot(function(q) wide(q) - w, c(peak, last), tol = 1e-11, extendInt = "no")$root
+  b <- if (last <= peak) last else side(w, last)
   beyond(a, r2) - beyond(b, r2)
 }`,
   python: `def wide(q):
@@ -82,13 +88,32 @@ def wider(w):
     return beyond(a, r2) - beyond(b, r2)`,
 } as const;
 
+/** Mean of x if R² is r2: that of the mixture of beta distributions. */
+const MEAN = {
+  sampled: {
+    r: `j <- 0:ceiling(qnbinom(1e-15, (n - 1) / 2, 1 - r2, lower.tail = FALSE))
+middle <- sum(dnbinom(j, (n - 1) / 2, 1 - r2) * (k / 2 + j) / ((n - 1) / 2 + j))`,
+    python: `j = np.arange(stats.nbinom.isf(1e-15, (n - 1) / 2, 1 - r2) + 1)
+middle = float(np.sum(stats.nbinom.pmf(j, (n - 1) / 2, 1 - r2) * (k / 2 + j) / ((n - 1) / 2 + j)))`,
+  },
+  fixed: {
+    r: `half <- n * r2 / (1 - r2) / 2
+j <- 0:ceiling(qpois(1e-15, half, lower.tail = FALSE))
+middle <- sum(dpois(j, half) * (k / 2 + j) / ((n - 1) / 2 + j))`,
+    python: `half = n * r2 / (1 - r2) / 2
+j = np.arange(stats.poisson.isf(1e-15, half) + 1)
+middle = float(np.sum(stats.poisson.pmf(j, half) * (k / 2 + j) / ((n - 1) / 2 + j)))`,
+  },
+} as const;
+
 function lines(variable: string, meaning: string, code: { r: string; python: string }): Step {
   return { variable, symbol: variable, meaning, formula: '', value: null, ...code };
 }
 
-export function r2IntervalSteps({ n, design, assurance, width }: R2Numbers): Step[] {
+/** What every width rests on: the distribution of the observed R², its quantiles, the limits of an interval. */
+function distributionSteps(n: number, design: R2Design): Step[] {
   const df = 'n - k - 1';
-  const common: Step[] = [
+  return [
     {
       variable: 'v',
       symbol: 'v',
@@ -101,6 +126,25 @@ export function r2IntervalSteps({ n, design, assurance, width }: R2Numbers): Ste
     lines('', 'probability that x exceeds q if R² is r', EXCEEDANCE[design.isSampled ? 'sampled' : 'fixed']),
     lines('', 'the x exceeded with probability p, and the limit of an interval', LIMITS),
   ];
+}
+
+/** The width of the interval at the mean of x. */
+export function widthAtMeanSteps(n: number, design: R2Design, width: number): Step[] {
+  const expression = 'limit(1 - alpha / 2, middle) - limit(alpha / 2, middle)';
+  return [
+    ...distributionSteps(n, design),
+    lines('', 'the mean of x', MEAN[design.isSampled ? 'sampled' : 'fixed']),
+    {
+      ...lines('achieved', 'width at the mean of x', { r: expression, python: expression }),
+      symbol: 'w',
+      formula: 'upper limit − lower limit, at the mean of x',
+      value: width,
+    },
+  ];
+}
+
+export function r2IntervalSteps({ n, design, assurance, width }: R2Numbers): Step[] {
+  const common = distributionSteps(n, design);
   if (assurance === null) {
     const meaning = 'expected width';
     return [

@@ -9,7 +9,7 @@ import { smallestInteger } from '../../numeric/solve/smallest-integer.ts';
 import type { Aim } from '../../spec/study.ts';
 import type { Alternative, Calculation, EffectForm, Equivalent, Step, Values } from '../method.ts';
 import { atAim } from './contradiction.ts';
-import { signOf, given } from './test-forms.ts';
+import { given, signOf } from './test-forms.ts';
 import { fTestSteps, tTestSteps } from './test-steps.ts';
 
 export interface TestDesign {

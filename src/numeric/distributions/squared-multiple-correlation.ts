@@ -1,71 +1,54 @@
-/** R² of a sample when the predictors are jointly normal: negative-binomial mixture of beta distributions. Provisional. */
+/** R² of a sample when outcome and predictors are jointly normal: negative-binomial mixture of beta distributions.
+ *  Domain: 0 ≤ r2 ≤ 1; predictors 1–1e4, n from predictors + 2 to 1e7, 0 ≤ populationR2 < 1.
+ *  Relative error (test/fixtures/squared-multiple-correlation.json): 1e-12 for both tails down to 1e-200.
+ *  @throws {RangeError} names argument, value and domain
+ *  Source: Gatsonis & Sampson (1989); as a mixture, Benton & Krishnamoorthy (2003). */
 
-import { incompleteBetaFront } from '../special/incomplete-beta.ts';
-import { logGamma } from '../special/log-gamma.ts';
-import { betaLowerTail, betaUpperTail } from './beta.ts';
+import { requireBetween } from '../domain.ts';
+import { mixtureTail } from '../mixtures/mixture-tail.ts';
+import { betaLadder } from '../mixtures/tail-ladder.ts';
+import { negativeBinomialWeights } from '../mixtures/weights.ts';
+import { betaPoint } from '../special/beta-point.ts';
+import type { Tail } from '../special/direct-tail.ts';
+import { betaTail } from '../special/incomplete-beta.ts';
 
-function mixture(
+function tailOf(
+  name: string,
   r2: number,
   predictors: number,
   n: number,
   populationR2: number,
-  tail: 'lower' | 'upper',
+  tail: Tail,
 ): number {
+  requireBetween(name, 'r2', r2, 0, 1);
+  requireBetween(name, 'predictors', predictors, 1, 1e4);
+  requireBetween(name, 'n', n, predictors + 1.5, 1e7);
+  requireBetween(name, 'populationR2', populationR2, 0, 1 - 1e-9);
+  if (r2 === 0) return tail === 'lower' ? 0 : 1;
+  if (r2 === 1) return tail === 'lower' ? 1 : 0;
+  const point = betaPoint(r2);
   const a = predictors / 2;
   const b = (n - predictors - 1) / 2;
-  if (r2 <= 0) return tail === 'lower' ? 0 : 1;
-  if (r2 >= 1) return tail === 'lower' ? 1 : 0;
-  if (populationR2 === 0) return tail === 'lower' ? betaLowerTail(r2, a, b) : betaUpperTail(r2, a, b);
-  const size = (n - 1) / 2;
-  const mean = (size * populationR2) / (1 - populationR2);
-  const deviation = Math.sqrt(mean / (1 - populationR2));
-  const start = Math.max(0, Math.floor(mean - 9 * deviation));
-  const end = Math.ceil(mean + 9 * deviation + 40);
-  const logWeight = (j: number) =>
-    logGamma(size + j) -
-    logGamma(size) -
-    logGamma(j + 1) +
-    size * Math.log1p(-populationR2) +
-    j * Math.log(populationR2);
-  let sum = 0;
-  if (tail === 'upper') {
-    let weight = Math.exp(logWeight(start));
-    let q = betaUpperTail(r2, a + start, b);
-    let term = incompleteBetaFront(r2, a + start, b) / (a + start);
-    for (let j = start; j <= end; j += 1) {
-      sum += weight * q;
-      q += term;
-      term *= (r2 * (a + b + j)) / (a + j + 1);
-      weight *= ((size + j) / (j + 1)) * populationR2;
-    }
-    return sum;
-  }
-  let weight = Math.exp(logWeight(end));
-  let p = betaLowerTail(r2, a + end, b);
-  let term = incompleteBetaFront(r2, a + end, b) / (a + end);
-  for (let j = end; j >= start; j -= 1) {
-    sum += weight * p;
-    term *= (a + j) / (r2 * (a + b + j - 1));
-    p += term;
-    weight *= j / ((size + j - 1) * populationR2);
-  }
-  return sum;
+  if (populationR2 === 0) return betaTail(point, a, b, tail);
+  return mixtureTail(negativeBinomialWeights((n - 1) / 2, populationR2), betaLadder(point, b, tail), a);
 }
 
+/** P(R² ≤ r2). */
 export function squaredMultipleCorrelationLowerTail(
   r2: number,
   predictors: number,
   n: number,
   populationR2: number,
 ): number {
-  return mixture(r2, predictors, n, populationR2, 'lower');
+  return tailOf('squaredMultipleCorrelationLowerTail', r2, predictors, n, populationR2, 'lower');
 }
 
+/** P(R² > r2). */
 export function squaredMultipleCorrelationUpperTail(
   r2: number,
   predictors: number,
   n: number,
   populationR2: number,
 ): number {
-  return mixture(r2, predictors, n, populationR2, 'upper');
+  return tailOf('squaredMultipleCorrelationUpperTail', r2, predictors, n, populationR2, 'upper');
 }

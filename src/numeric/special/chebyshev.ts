@@ -1,5 +1,5 @@
 /** Σ c_j T_j(t) for t in [-1, 1].
- *  Source: Clenshaw (1955), A note on the summation of Chebyshev series, recurrence (3). */
+ *  Source: Clenshaw (1955), A note on the summation of Chebyshev series. */
 export function chebyshevSum(coefficients: Float64Array, t: number): number {
   const twice = 2 * t;
   let next = 0;

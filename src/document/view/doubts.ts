@@ -82,19 +82,19 @@ function margin({ plan, margins }: AimSensitivity, { aims }: Study): string | nu
     const limit = limits.find((one) => one.floor === floor);
     if (stage !== null || limit === undefined || limit.value === null) return [];
     const text = withUnit(computedNumber(limit.value, quantity.unit), unitText(quantity.unit, units));
-    return [`the ${quantity.title} at ${text}`];
+    return [`the ${quantity.title} is ${text}`];
   });
   // Whatever the losses, they work through the number that is left.
   const left = margins.flatMap(({ limits }) =>
     limits.filter((one) => one.floor === floor && one.left !== null),
   )[0]?.left;
-  if (left !== undefined && left !== null) clauses.push(`only ${formatCount(left)} analysed`);
+  if (left !== undefined && left !== null) clauses.push(`only ${formatCount(left)} are analysed`);
   if (clauses.length === 0) return null;
   const falls =
     plan.method.achieves === 'power'
       ? `The power falls to ${powerTarget(floor)}`
       : `The interval widens to ${achievedText(plan, floor)}`;
-  return `${falls} with ${list(clauses)}, each taken alone.`;
+  return `${falls} if one of these holds: ${list(clauses, 'or')}.`;
 }
 
 function worst({ plan, ranges }: AimSensitivity, { sample }: Study): string | null {

@@ -13,11 +13,11 @@ import { aimsTable, stagesTable } from './study-tables.ts';
 import { basisText, sentence } from './wording.ts';
 
 const KIND_TITLES: Record<DocumentKind, string> = {
-  ethics: 'Sample size, section for an ethics application',
-  grant: 'Sample size, section for a grant application',
-  preregistration: 'Sample size, section for a preregistration',
-  protocol: 'Sample size, section for a study protocol',
-  appendix: 'Sample size, appendix for reviewers',
+  ethics: 'Section for an ethics application',
+  grant: 'Section for a grant application',
+  preregistration: 'Section for a preregistration',
+  protocol: 'Section for a study protocol',
+  appendix: 'Appendix for reviewers',
 };
 
 export function buildView(report: FullReport, kind: DocumentKind) {

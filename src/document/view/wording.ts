@@ -115,7 +115,7 @@ export function sentence(text: string): string {
   return /[.!?…]["’”)]*\s*$/.test(text) ? text.trim() : `${text.trim()}.`;
 }
 
-export function list(items: readonly string[]): string {
+export function list(items: readonly string[], conjunction: 'and' | 'or' = 'and'): string {
   if (items.length < 2) return items.join('');
-  return `${items.slice(0, -1).join(', ')} and ${items.at(-1)}`;
+  return `${items.slice(0, -1).join(', ')} ${conjunction} ${items.at(-1)}`;
 }

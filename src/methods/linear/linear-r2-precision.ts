@@ -47,7 +47,7 @@ function smallestNumber({ predictors }: R2Design): number {
 
 /** The number by the definition of Kelley (2008; from memory): the width of the interval at the mean of R² in place of the
  *  mean of the width. */
-function atMean(r2: number, width: number, design: R2Design): Alternative[] {
+function atMean(r2: number, width: number, design: R2Design, assurance: number | null): Alternative[] {
   const widthWith = (n: number) => widthAtMean(r2, n, design);
   try {
     const n = smallestInteger(
@@ -59,7 +59,7 @@ function atMean(r2: number, width: number, design: R2Design): Alternative[] {
     return [
       {
         key: 'at_mean',
-        description: 'with the width of the interval at the expected R² in place of the expected width',
+        description: `with the width of the interval at the expected R² in place of the ${assurance === null ? 'expected' : 'assured'} width`,
         n,
         steps: (count) => widthAtMeanSteps(count, design, widthWith(count)),
       },
@@ -147,7 +147,7 @@ export const linearR2Precision: Method = {
           value,
         })),
       ],
-      alternatives: (r2, width) => atMean(r2, width, design),
+      alternatives: (r2, width) => atMean(r2, width, design, assurance),
     };
   },
 };

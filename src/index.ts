@@ -1,7 +1,7 @@
 /** Samplecase as a library: a spec in, problems, numbers and documents out. Nothing here touches disk, network or
  *  clock, on import or later. */
 
-import { type RenderedDocument, renderDocument } from './document/document.ts';
+import { type RenderedDocument, renderDocuments } from './document/document.ts';
 import type { TemplateSet } from './document/templates.ts';
 import type { ResultJson } from './generated/result.ts';
 import { type Problem, ProblemError } from './problem.ts';
@@ -80,15 +80,14 @@ export function render(
   const report = plannable(spec, options);
   const asked = report.study.documents.find((document) => document.kind === kind);
   const request = { kind, words: null, citations: 'apa' as const, ...asked, formats: [format] };
-  const [document] = renderDocument(withSensitivities(report), request, options.templates ?? {});
+  const [document] = renderDocuments(withSensitivities(report), [request], options.templates ?? {});
   if (document === undefined) throw new Error(`no document for format ${format}`);
   return document;
 }
 
 /** Every document the spec asks for. The report is that of `check`. */
 export function renderAll(report: Report, templates: TemplateSet = {}): RenderedDocument[] {
-  const full = withSensitivities(report);
-  return report.study.documents.flatMap((request) => renderDocument(full, request, templates));
+  return renderDocuments(withSensitivities(report), report.study.documents, templates);
 }
 
 function plannable(spec: string | object, options: SpecOptions): Report {

@@ -3,7 +3,7 @@
 
 import type { StudyPlan } from './plan/plan.ts';
 import { planStudy } from './plan/plan-study.ts';
-import { type Judgement, judgePlan, judgeStudy } from './rules/rules.ts';
+import { type Judgement, judge } from './rules/rules.ts';
 import { type AimSensitivity, sensitivityOf } from './sensitivity/sensitivity.ts';
 import type { Study } from './spec/study.ts';
 
@@ -20,9 +20,8 @@ export interface FullReport extends Report {
 
 /** @throws ProblemError when the study cannot be planned. */
 export function buildReport(study: Study): Report {
-  const early = judgeStudy(study);
   const plan = planStudy(study);
-  return { study, plan, judgements: [...early, ...judgePlan(plan)] };
+  return { study, plan, judgements: judge(plan) };
 }
 
 export function withSensitivities(report: Report): FullReport {

@@ -1,4 +1,4 @@
-/** Report + request → one document, in every format asked for: view → Markdown, shortened if need be → HTML. */
+/** Report + requests → documents in every format asked for: view → Markdown, shortened if need be → HTML. */
 
 import type { FullReport } from '../report.ts';
 import { sources } from '../sources/sources.ts';
@@ -7,9 +7,9 @@ import { CitationLog } from './citations/citations.ts';
 import { toHtml } from './markdown/to-html.ts';
 import { countWords } from './markdown/words.ts';
 import { renderPage } from './page.ts';
-import { type Rendering, renderTemplate, type TemplateSet } from './templates.ts';
-import { figuresOf } from './view/aim-figures.ts';
-import { buildView } from './view/view.ts';
+import { type Rendering, type TemplateRenderer, type TemplateSet, templateRenderer } from './templates.ts';
+import { type Figure, figuresOf } from './view/aim-figures.ts';
+import { buildView, kindWords, type StudyView } from './view/view.ts';
 
 export interface RenderedFile {
   /** Path below the output folder. */
@@ -30,38 +30,53 @@ export interface RenderedDocument {
   remarks: string[];
 }
 
-export function renderDocument(
+/** The documents asked for. What they share is made once: the view, the figures, the references. */
+export function renderDocuments(
   report: FullReport,
-  request: DocumentRequest,
+  requests: readonly DocumentRequest[],
   overrides: TemplateSet,
 ): RenderedDocument[] {
+  const shared: Shared = {
+    title: report.study.title,
+    view: buildView(report),
+    figures: report.sensitivities.flatMap((sensitivity) => figuresOf(sensitivity, report.study)),
+    references: new Map([...sources, ...report.study.references].map((item) => [item.id, item])),
+    overrides,
+    render: templateRenderer(overrides),
+  };
+  return requests.flatMap((request) => renderDocument(shared, request));
+}
+
+interface Shared {
+  title: string;
+  view: StudyView;
+  figures: Figure[];
+  references: ReadonlyMap<string, Reference>;
+  overrides: TemplateSet;
+  render: TemplateRenderer;
+}
+
+function renderDocument(shared: Shared, request: DocumentRequest): RenderedDocument[] {
   const { kind } = request;
-  const view = buildView(report, kind);
-  const references = new Map<string, Reference>([
-    ...sources.map((item) => [item.id, item] as const),
-    ...report.study.references.map((item) => [item.id, item] as const),
-  ]);
+  const view = { ...shared.view, ...kindWords(kind) };
   const attempt = (dropped: ReadonlySet<string>) =>
-    renderTemplate({
+    shared.render({
       template: `documents/${kind}`,
       view,
-      citations: new CitationLog(request.citations, references),
+      citations: new CitationLog(request.citations, shared.references),
       dropped,
-      overrides,
     });
   const { markdown, words, remarks } = fitted(attempt, request);
-  const figures = report.sensitivities
-    .flatMap((sensitivity) => figuresOf(sensitivity, report.study))
-    .filter(({ name }) => markdown.includes(`](${name})`));
+  const figures = shared.figures.filter(({ name }) => markdown.includes(`](${name})`));
   return request.formats.map((format) => {
     const content =
       format === 'markdown'
         ? markdown
         : renderPage({
-            title: `${view.title}: ${report.study.title}`,
+            title: `${view.title}: ${shared.title}`,
             kind,
+            overrides: shared.overrides,
             bodyHtml: toHtml(markdown, new Map(figures.map(({ name, svg }) => [name, svg]))),
-            overrides,
           });
     const name = `${kind}.${format === 'markdown' ? 'md' : 'html'}`;
     const shown =

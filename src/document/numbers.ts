@@ -41,14 +41,17 @@ export function formatProbability(value: number): string {
 }
 
 /**
- * To `digits` significant digits, without zeros at the end: `0.0638`, `12.5`, `30`.
- * @throws {RangeError} where value is not finite or digits is no whole number from 1 to 17
+ * To `digits` significant digits, without zeros at the end: `0.0638`, `12.5`, `30`. With a target, to as many more as
+ * it takes to print the value on its side of it: a width of 2.5004 is not within 2.5.
+ * @throws {RangeError} where a number is not finite or digits is no whole number from 1 to 17
  */
-export function formatSignificant(value: number, digits: number): string {
+export function formatSignificant(value: number, digits: number, target?: number): string {
   if (!(Number.isInteger(digits) && digits >= 1 && digits <= 17)) {
     throw new RangeError(`digits is ${digits}; it has to be a whole number from 1 to 17`);
   }
-  return formatExact(Number(checkFinite(value).toPrecision(digits)));
+  const rounded = Number(checkFinite(value).toPrecision(digits));
+  const crosses = target !== undefined && value > checkFinite(target) !== rounded > target;
+  return crosses && digits < 17 ? formatSignificant(value, digits + 1, target) : formatExact(rounded);
 }
 
 /**

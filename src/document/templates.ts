@@ -31,22 +31,38 @@ export interface RenderRequest {
   citations: CitationLog;
   /** Ids of sentences left out. */
   dropped: ReadonlySet<string>;
-  /** A user's own templates, which replace ours path by path. */
-  overrides: TemplateSet;
 }
 
-export function renderTemplate(request: RenderRequest): Rendering {
-  const { template, view, citations, dropped, overrides } = request;
-  const sentences: Sentence[] = [];
-  const said = new Set<string>();
+export type TemplateRenderer = (request: RenderRequest) => Rendering;
+
+/** What one rendering gathers while its templates run. */
+interface Progress extends Pick<RenderRequest, 'citations' | 'dropped'> {
+  sentences: Sentence[];
+  /** Droppable sentences printed so far. */
+  said: Set<string>;
+}
+
+/** @param overrides a user's own templates, which replace ours path by path */
+export function templateRenderer(overrides: TemplateSet): TemplateRenderer {
   const handlebars = (runtime as unknown as typeof Handlebars).create();
-  const all = { ...builtIn, ...overrides };
-  for (const [path, compiled] of Object.entries(all)) {
+  for (const [path, compiled] of Object.entries({ ...builtIn, ...overrides })) {
     handlebars.registerPartial(path, handlebars.template(compiled as TemplateSpecification));
   }
-  handlebars.registerHelper({
+  let progress: Progress;
+  handlebars.registerHelper(helpers(() => progress));
+  return ({ template, view, citations, dropped }) => {
+    const render = handlebars.partials[template] as Handlebars.TemplateDelegate | undefined;
+    if (render === undefined) throw new Error(`no template ${template}`);
+    progress = { citations, dropped, sentences: [], said: new Set() };
+    return { markdown: tidy(render(view)), sentences: progress.sentences };
+  };
+}
+
+function helpers(now: () => Progress): Record<string, Handlebars.HelperDelegate> {
+  return {
     sentence(this: unknown, id: string, options: Handlebars.HelperOptions) {
       const { drop, reports } = options.hash as { drop?: number; reports?: string };
+      const { sentences, dropped, said } = now();
       sentences.push({ id, drop: drop ?? null, reports: reports?.split(' ') ?? [] });
       if (dropped.has(id)) return '';
       const text = oneLine(options.fn(this));
@@ -63,17 +79,14 @@ export function renderTemplate(request: RenderRequest): Rendering {
     count: (number: number, singular: string, plural: string) =>
       `${inWords(number)} ${number === 1 ? singular : plural}`,
     cite: (keys: string | string[], form?: unknown) =>
-      citations.cite(Array.isArray(keys) ? keys : [keys], citationForm(form)),
-    citations: () => citations.list().length > 0,
+      now().citations.cite(Array.isArray(keys) ? keys : [keys], citationForm(form)),
+    citations: () => now().citations.list().length > 0,
     references: () =>
-      citations
-        .list()
+      now()
+        .citations.list()
         .map((entry) => `${entry}\n`)
         .join('\n'),
-  });
-  const render = handlebars.partials[template] as Handlebars.TemplateDelegate | undefined;
-  if (render === undefined) throw new Error(`no template ${template}`);
-  return { markdown: tidy(render(view)), sentences };
+  };
 }
 
 /** A template that is whole in itself, such as the shell of the page: it holds no sentences and cites nothing. */

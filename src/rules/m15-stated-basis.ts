@@ -1,5 +1,5 @@
-import type { Aim, Quantity, Study } from '../spec/study.ts';
 import { listed } from '../spec/shown.ts';
+import type { Aim, Quantity, Study } from '../spec/study.ts';
 import type { Rule } from './rule.ts';
 import { leadingOf } from './support/aim.ts';
 import { type Part, together } from './support/findings.ts';
@@ -68,6 +68,9 @@ function lossesWithoutBasis({ sample }: Study): Part | null {
   return {
     path: first.path,
     level: 'warning',
-    message: `There is no basis stated for the loss at ${which} (${listed(bare.map(({ path }) => path), 'and')}). Say where ${bare.length === 1 ? 'the proportion comes' : 'the proportions come'} from.`,
+    message: `There is no basis stated for the loss at ${which} (${listed(
+      bare.map(({ path }) => path),
+      'and',
+    )}). Say where ${bare.length === 1 ? 'the proportion comes' : 'the proportions come'} from.`,
   };
 }

@@ -1,5 +1,5 @@
-import { requiredOrNull } from '../sensitivity/required-table.ts';
 import type { AimPlan, StudyPlan } from '../plan/plan.ts';
+import { requiredOrNull } from '../sensitivity/required-table.ts';
 import type { Rule } from './rule.ts';
 import { type Part, together } from './support/findings.ts';
 import { shownLevel } from './support/numbers.ts';
@@ -41,9 +41,10 @@ function laxInTrial({ aim }: AimPlan, { study }: StudyPlan): Part | null {
 }
 
 /** What the same test would need two-sided at the same alpha. */
-function neededTwoSided({ aim, method, effect, target }: AimPlan): number | null {
+function neededTwoSided(plan: AimPlan): number | null {
+  const { aim, method, effect, target } = plan;
   if (aim.find !== 'sample-size' || effect === null || target === null) return null;
   const twoSided = { ...aim, criteria: { ...aim.criteria, sides: 2 as const } };
   const calculation = method.prepare(twoSided);
-  return requiredOrNull({ ...planOf({ aim: twoSided, method, effect, target }), calculation }, effect, target);
+  return requiredOrNull({ ...plan, aim: twoSided, calculation }, effect, target);
 }

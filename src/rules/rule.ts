@@ -1,7 +1,7 @@
 /** The interface a rule fills: one small module a rule, all listed in rules.ts. */
 
-import type { AimPlan, StudyPlan } from '../plan/plan.ts';
 import type { Source } from '../methods/method.ts';
+import type { AimPlan, StudyPlan } from '../plan/plan.ts';
 import type { Study } from '../spec/study.ts';
 
 /** What a rule found. */

@@ -26,7 +26,8 @@ export interface RangeRow {
   stage: string | null;
   low: Outcome | null;
   high: Outcome | null;
-  unfavourable: 'low' | 'high';
+  /** The end at which the plan fares worse than planned; null when neither is. */
+  unfavourable: 'low' | 'high' | null;
   /** Enrolled people (or power, width) between the best and the worst end. */
   swing: number;
 }
@@ -102,7 +103,7 @@ function rangeRow(plan: AimPlan, study: StudyPlan, { quantity, stage }: Candidat
     stage,
     low,
     high,
-    unfavourable: ofLow >= ofHigh ? 'low' : 'high',
+    unfavourable: Math.max(ofLow, ofHigh) <= cost(plan, planned) ? null : ofLow >= ofHigh ? 'low' : 'high',
     swing: Math.abs(ofLow - ofHigh),
   };
 }
@@ -115,5 +116,5 @@ function cost(plan: AimPlan, { required, achieved }: Outcome): number {
 }
 
 function worstValue({ quantity, unfavourable }: RangeRow): number {
-  return quantity[unfavourable] ?? quantity.value;
+  return unfavourable === null ? quantity.value : (quantity[unfavourable] ?? quantity.value);
 }

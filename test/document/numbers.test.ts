@@ -117,6 +117,27 @@ describe('formatSignificant', () => {
     expect(formatSignificant(value, digits)).toBe(text);
   });
 
+  test.each([
+    [2.5004, 2.5, '2.5004'],
+    [0.2003, 0.2, '0.2003'],
+    [0.2, 0.2, '0.2'],
+    [0.19996, 0.2, '0.2'],
+    [0.19996, 0.19998, '0.19996'],
+    [1.567, 1.6, '1.57'],
+  ])('prints %s with target %s as %s', (value, target, text) => {
+    expect(formatSignificant(value, 3, target)).toBe(text);
+  });
+
+  test('never prints a value on the other side of its target', () => {
+    const width = fc.double({ min: 1e-6, max: 1e6, noNaN: true });
+    fc.assert(
+      fc.property(width, fc.double({ min: -1e-3, max: 1e-3, noNaN: true }), (target, gap) => {
+        const value = target * (1 + gap);
+        expect(read(formatSignificant(value, 3, target)) > target).toBe(value > target);
+      }),
+    );
+  });
+
   test('refuses digits that make no sense, and numbers that are none', () => {
     expect(() => formatSignificant(1, 0)).toThrow('digits is 0; it has to be a whole number from 1 to 17');
     expect(() => formatSignificant(1, 2.5)).toThrow(RangeError);

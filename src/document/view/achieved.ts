@@ -8,5 +8,5 @@ export function achievedText(plan: AimPlan, achieved: number | null, target = pl
   if (achieved === null) return null;
   if (plan.method.achieves === 'power') return formatPower(achieved, target ?? undefined);
   const unit = plan.method.achievedUnit;
-  return withUnit(computedNumber(achieved, unit), unitText(unit, unitsOf(plan.aim)));
+  return withUnit(computedNumber(achieved, unit, target ?? undefined), unitText(unit, unitsOf(plan.aim)));
 }

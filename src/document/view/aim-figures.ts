@@ -24,12 +24,14 @@ export interface Figure {
   svg: string;
 }
 
+/** File name and title, which the Markdown needs; null where there is nothing to draw. */
+type Caption = Pick<Figure, 'name' | 'title'>;
+
 /** Markdown that shows the figures; null where there is nothing to draw. */
-export function figureReferences(sensitivity: AimSensitivity, words: Study) {
-  const [curve, margins] = [curveFigure(sensitivity, words), marginFigure(sensitivity, words)];
-  const reference = (figure: Figure | null) =>
-    figure === null ? null : `![${figure.title}](${figure.name})`;
-  return { curve: reference(curve), margins: reference(margins) };
+export function figureReferences(sensitivity: AimSensitivity) {
+  const reference = (caption: Caption | null) =>
+    caption === null ? null : `![${caption.title}](${caption.name})`;
+  return { curve: reference(curveCaption(sensitivity)), margins: reference(marginCaption(sensitivity)) };
 }
 
 export function figuresOf(sensitivity: AimSensitivity, words: Study): Figure[] {
@@ -38,22 +40,38 @@ export function figuresOf(sensitivity: AimSensitivity, words: Study): Figure[] {
   );
 }
 
-function curveFigure({ curve, plan }: AimSensitivity, words: Study): Figure | null {
+function curveCaption({ curve, plan }: AimSensitivity): Caption | null {
+  if (curve === null || plan.planned.achieved === null) return null;
+  const isPower = plan.method.achieves === 'power';
+  return {
+    name: `${plan.aim.id}-${plan.method.achieves}.svg`,
+    title: `${isPower ? 'Power' : 'Width of the interval'} of the aim “${plan.aim.id}” against the number analysed`,
+  };
+}
+
+function marginCaption({ margins, plan }: AimSensitivity): Caption | null {
+  if ((margins[0]?.limits.length ?? 0) === 0) return null;
+  return {
+    name: `${plan.aim.id}-margins.svg`,
+    title: `How far the assumptions of the aim “${plan.aim.id}” can slip`,
+  };
+}
+
+function curveFigure(sensitivity: AimSensitivity, words: Study): Figure | null {
+  const { curve, plan } = sensitivity;
   const { planned, target, method, aim } = plan;
-  if (curve === null || planned.achieved === null) return null;
+  const caption = curveCaption(sensitivity);
+  if (caption === null || curve === null || planned.achieved === null) return null;
   const isPower = method.achieves === 'power';
-  const what = isPower ? 'Power' : 'Width of the interval';
   const { sample } = words;
   const quantity = Object.values(aim.quantities).find(({ key }) => key === aim.effectKeys[0]);
   const range = quantity === undefined ? null : rangeText(quantity);
   const band = !curve.hasBand || quantity === undefined ? null : `${quantity.title} ${range}`;
-  const title = `${what} of the aim “${aim.id}” against the number analysed`;
   return {
-    name: `${aim.id}-${isPower ? 'power' : 'width'}.svg`,
-    title,
+    ...caption,
     svg: powerCurve({
       prefix: `${aim.id}-curve`,
-      title,
+      title: caption.title,
       description: `With ${planned.n} ${sample.unit} analysed the ${isPower ? 'power' : 'width'} is ${achievedText(plan, planned.achieved)}${target === null ? '' : `; the target is ${typedNumber(target, '')}`}.${band === null ? '' : ` The band shows ${band}.`}`,
       xLabel: `${sample.unit} analysed`,
       yLabel: isPower ? 'power' : 'full width of the interval',
@@ -65,18 +83,18 @@ function curveFigure({ curve, plan }: AimSensitivity, words: Study): Figure | nu
   };
 }
 
-function marginFigure({ margins, plan }: AimSensitivity, words: Study): Figure | null {
-  const first = margins[0];
-  if (first === undefined || first.limits.length === 0) return null;
+function marginFigure(sensitivity: AimSensitivity, words: Study): Figure | null {
+  const { margins, plan } = sensitivity;
+  const caption = marginCaption(sensitivity);
+  const [first] = margins;
+  if (caption === null || first === undefined) return null;
   const { aim, method } = plan;
   const units = unitsOf(aim);
-  const title = `How far the assumptions of the aim “${aim.id}” can slip`;
   return {
-    name: `${aim.id}-margins.svg`,
-    title,
+    ...caption,
     svg: marginPlot({
       prefix: `${aim.id}-margins`,
-      title,
+      title: caption.title,
       description: `For each assumption its planned value, its stated range, and where the planned study falls below ${first.limits.map(({ floor }) => typedNumber(floor, '')).join(' and ')}.`,
       rows: margins.map(({ quantity, stage, limits }) => {
         const unit = unitText(quantity.unit, units);

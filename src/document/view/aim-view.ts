@@ -27,6 +27,7 @@ import {
   type Units,
   unitsOf,
   unitText,
+  withArticle,
   withUnit,
 } from './wording.ts';
 
@@ -101,7 +102,7 @@ export function aimView(sensitivity: AimSensitivity, study: StudyPlan, words: St
     doubt: doubtSentences(sensitivity, words),
     tables: { ...arithmeticTables(sensitivity, words), ...bySensitivity },
     sensitivityTables: Object.values(bySensitivity).filter((table) => table !== null),
-    figures: figureReferences(sensitivity, words),
+    figures: figureReferences(sensitivity),
     recompute: {
       r: recomputeScript(r, sensitivity, study),
       python: recomputeScript(python, sensitivity, study),
@@ -110,7 +111,7 @@ export function aimView(sensitivity: AimSensitivity, study: StudyPlan, words: St
 }
 
 function detectableText(plan: AimPlan, effect: number, units: Units): string {
-  return effectText(plan.calculation.equivalents(effect), plan.aim.effectKeys[0] ?? null, units);
+  return withArticle(effectText(plan.calculation.equivalents(effect), plan.aim.effectKeys[0] ?? null, units));
 }
 
 function targetText({ method }: AimPlan, target: number | null, units: Units): string | null {
@@ -138,7 +139,7 @@ function statedEffect(plan: AimPlan, quantity: Quantity, units: Units) {
           .filter(({ key }) => key !== quantity.key)
           .map((one) => equivalentText(one, units));
   return {
-    text: stated(quantity, units),
+    text: withArticle(stated(quantity, units)),
     also: others.length === 0 ? null : others.join('; '),
     range: rangeText(quantity),
     basis: basisText(quantity.basis),

@@ -37,6 +37,9 @@ export function doubtSentences(sensitivity: AimSensitivity, words: Study): Doubt
 function whatIf({ plan, ranges }: AimSensitivity, { sample, aims }: Study): string | null {
   const row = ranges?.rows[0];
   if (row === undefined) return null;
+  if (row.unfavourable === null) {
+    return `Nowhere in its range does the ${nameOf(row, sample.losses)} ask for more than planned.`;
+  }
   const end = row[row.unfavourable];
   const value = row.quantity[row.unfavourable];
   if (end === null || value === null) return null;
@@ -94,7 +97,9 @@ function margin({ plan, margins }: AimSensitivity, { aims }: Study): string | nu
     plan.method.achieves === 'power'
       ? `The power falls to ${powerTarget(floor)}`
       : `The interval widens to ${achievedText(plan, floor)}`;
-  return `${falls} if one of these holds: ${list(clauses, 'or')}.`;
+  return clauses.length === 1
+    ? `${falls} if ${clauses[0]}.`
+    : `${falls} if one of these holds: ${list(clauses, 'or')}.`;
 }
 
 function worst({ plan, ranges }: AimSensitivity, { sample }: Study): string | null {

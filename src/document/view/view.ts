@@ -20,7 +20,20 @@ const KIND_TITLES: Record<DocumentKind, string> = {
   appendix: 'Appendix for reviewers',
 };
 
-export function buildView(report: FullReport, kind: DocumentKind) {
+export type StudyView = ReturnType<typeof buildView>;
+
+/** What a document's kind adds to the view. */
+export function kindWords(kind: DocumentKind) {
+  return {
+    kind,
+    kindTitle: KIND_TITLES[kind],
+    title: kind === 'appendix' ? 'Sample size: reviewer’s appendix' : 'Sample size',
+    isAppendix: kind === 'appendix',
+  };
+}
+
+/** What all documents of a study may print. */
+export function buildView(report: FullReport) {
   const { plan, judgements } = report;
   const study = escapedStudy(report.study);
   const common = {
@@ -36,9 +49,6 @@ export function buildView(report: FullReport, kind: DocumentKind) {
   const mainAims = aims.filter(isMain);
   return {
     ...common,
-    kind,
-    kindTitle: KIND_TITLES[kind],
-    title: kind === 'appendix' ? 'Sample size: reviewer’s appendix' : 'Sample size',
     study: studyWords(study),
     severalAims: aims.length > 1,
     severalSizing: sizing.length > 1 ? sizing.length : null,
@@ -73,7 +83,7 @@ export function buildView(report: FullReport, kind: DocumentKind) {
       message,
       acknowledged,
     })),
-    pointsToAppendix: kind !== 'appendix' && study.documents.some((document) => document.kind === 'appendix'),
+    pointsToAppendix: study.documents.some((document) => document.kind === 'appendix'),
     software: { name: 'Samplecase', version, hash: study.hash, shortHash: study.hash.slice(0, 12) },
   };
 }
@@ -106,7 +116,7 @@ function recruitmentWords({ sample: { recruitment } }: Study, enrol: number) {
     eligible: formatExact(eligiblePerMonth),
     consent: consent === 1 ? null : formatPercent(consent),
     needed: formatCount(Math.ceil(enrol / monthly)),
-    startUp: startUpMonths === 0 ? null : formatExact(startUpMonths),
+    startUp: startUpMonths === 0 ? null : startUpMonths,
     months: formatExact(months),
   };
 }

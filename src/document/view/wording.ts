@@ -37,9 +37,9 @@ export function typedNumber(value: number, unit: string): string {
   return pure(formatExact(value), unit);
 }
 
-/** A computed number for reading. */
-export function computedNumber(value: number, unit: string): string {
-  return pure(formatSignificant(value, COMPUTED_DIGITS), unit);
+/** A computed number for reading, on the side of its target where there is one. */
+export function computedNumber(value: number, unit: string, target?: number): string {
+  return pure(formatSignificant(value, COMPUTED_DIGITS, target), unit);
 }
 
 function pure(text: string, unit: string): string {
@@ -113,6 +113,11 @@ export function effectText(
 /** The author's own sentence, with a full stop if it ends without one. */
 export function sentence(text: string): string {
   return /[.!?…]["’”)]*\s*$/.test(text) ? text.trim() : `${text.trim()}.`;
+}
+
+/** 'an R² of .3', 'a slope of 2': by how the first word is spoken. */
+export function withArticle(text: string): string {
+  return `${/^(?:[aeiou]|R²|f²)/.test(text) ? 'an' : 'a'} ${text}`;
 }
 
 export function list(items: readonly string[], conjunction: 'and' | 'or' = 'and'): string {

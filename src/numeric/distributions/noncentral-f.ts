@@ -4,15 +4,22 @@
  *  @throws {RangeError} names argument, value and domain */
 
 import { requireBetween, requireNonNegative } from '../domain.ts';
+import { mixtureQuantile } from '../mixtures/mixture-quantile.ts';
 import { mixtureTail } from '../mixtures/mixture-tail.ts';
 import { betaLadder } from '../mixtures/tail-ladder.ts';
 import { poissonWeights } from '../mixtures/weights.ts';
 import { betaPointOfProduct } from '../special/beta-point.ts';
 import type { Tail } from '../special/direct-tail.ts';
 import { betaTail } from '../special/incomplete-beta.ts';
-import { mixtureQuantile } from '../mixtures/mixture-quantile.ts';
 
-function tailOf(name: string, x: number, df1: number, df2: number, noncentrality: number, tail: Tail): number {
+function tailOf(
+  name: string,
+  x: number,
+  df1: number,
+  df2: number,
+  noncentrality: number,
+  tail: Tail,
+): number {
   requireNonNegative(name, 'x', x);
   requireBetween(name, 'df1', df1, 0.5, 1e4);
   requireBetween(name, 'df2', df2, 1, 1e7);

@@ -70,7 +70,9 @@ function oppositeTail(t: number, df: number, delta: number): number {
   // Over u = ln s, where the density of s is e^(constant − half·(w − 1 − ln w)), w = s².
   const logIntegrand = (u: number) => {
     const w = Math.exp(2 * u);
-    return constant - half * devianceTerm(Math.expm1(2 * u), w, 0) + normalLogUpperTail(delta + t * Math.exp(u));
+    return (
+      constant - half * devianceTerm(Math.expm1(2 * u), w, 0) + normalLogUpperTail(delta + t * Math.exp(u))
+    );
   };
   const mode = highest(logIntegrand, Math.min(0, -Math.log(t + 1)));
   const top = logIntegrand(mode);

@@ -1,8 +1,8 @@
 /** Tails of a family of distributions whose shape grows by one: Beta(a + i, b) or Gamma(a + i) at a fixed point.
  *  Neighbouring tails differ by a positive step, so that going the right way nothing is ever subtracted. */
 
-import { type BetaPoint, excessOverMean } from '../special/beta-point.ts';
 import { logBetaFront } from '../special/beta-front.ts';
+import { type BetaPoint, excessOverMean } from '../special/beta-point.ts';
 import type { Tail } from '../special/direct-tail.ts';
 import { betaLogTail, betaTail } from '../special/incomplete-beta.ts';
 import { directGammaTail, gammaLogTail, gammaTail } from '../special/incomplete-gamma.ts';

@@ -42,6 +42,8 @@ export function predictorValues(aim: Aim): string | undefined {
 
 /** Whether the author calls the study an experiment or a trial, with values set by design. */
 export function isExperiment(study: Study): boolean {
-  const isDenied = /\b(?:non|quasi)[\s-]?(?:experiment|randomi)|\bnot randomi|\bobservational\b/i.test(study.design);
+  const isDenied = /\b(?:non|quasi)[\s-]?(?:experiment|randomi)|\bnot randomi|\bobservational\b/i.test(
+    study.design,
+  );
   return !isDenied && /\brandomi[sz]|\bexperiment|\bfactorial\b|\btrial\b/i.test(study.design);
 }

@@ -2,8 +2,8 @@
 
 import type { Values } from '../../methods/method.ts';
 import type { AimPlan, Yield } from '../../plan/plan.ts';
-import { achievedWith, effectWith } from '../../sensitivity/scenario.ts';
 import { requiredOrNull } from '../../sensitivity/required-table.ts';
+import { achievedWith, effectWith } from '../../sensitivity/scenario.ts';
 import { shownComputed, shownPower } from './numbers.ts';
 
 /** What the aim will have: at its own number where that is given, at the most that can be had where that is too small,

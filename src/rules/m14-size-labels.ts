@@ -19,7 +19,7 @@ export const sizeLabels: Rule = {
   why: 'Small, medium and large are labels that were offered for want of anything better. A standardised effect mixes importance with noise of measurement: a worse instrument needs no more people for the same label. The effect has to be one that somebody would want to find, in units that a reader can judge.',
   sources: [
     { key: 'lenth2001', of: 'why standardised benchmarks are no basis by themselves' },
-    { key: 'delta2', of: 'how to choose a target difference' },
+    { key: 'cook2018', of: 'how to choose a target difference' },
   ],
   ground: null,
   checkStudy: (study) => study.aims.flatMap((aim) => together(aim.id, [labelled(aim)])),

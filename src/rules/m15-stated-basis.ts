@@ -19,7 +19,7 @@ export const statedBasis: Rule = {
   title: 'Every assumed number has a basis, and the effect a reason',
   why: 'The effect decides the number of people more than anything else, and a reader can judge it only by knowing where it comes from, who decided on it and why. Of 446 trial protocols sent to ethics committees fewer than half justified the effect and one in eight discussed whether it mattered. “Clinically significant” without a reason says nothing (the line at eight words is common practice, without a source).',
   sources: [
-    { key: 'delta2', of: 'the need to justify the target difference', at: 'recommendations 3 and 4' },
+    { key: 'cook2018', of: 'the need to justify the target difference', at: 'recommendations 3 and 4' },
     { key: 'clark2013', of: 'how seldom protocols do so' },
   ],
   ground: null,

@@ -19,7 +19,7 @@ export const pilotSpread: Rule = {
   sources: [
     { key: 'browne1995', of: 'the upper limit of a standard deviation' },
     { key: 'teare2014', of: 'the number measured from which a pilot gives a standard deviation' },
-    { key: 'vickers2003rct', of: 'how often planned standard deviations were too small' },
+    { key: 'vickers2003b', of: 'how often planned standard deviations were too small' },
   ],
   ground: null,
   checkAim: (plan) =>

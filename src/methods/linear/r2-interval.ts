@@ -53,7 +53,7 @@ export function expectedWidth(population: number, n: number, design: R2Design): 
   const cap = 1 - (1 - population) / 1000;
   const lowest = lowerLimit(exceededWith(1 - NEGLIGIBLE, population, n, design), n, design);
   const highest = limit(1 - alpha / 2, exceededWith(NEGLIGIBLE, population, n, design), n, design, cap);
-  return integrate(covers, lowest, highest, { relativeTolerance: 1e-6 });
+  return integrate(covers, lowest, highest, { relativeTolerance: 1e-9 });
 }
 
 const NEGLIGIBLE = 1e-10;

@@ -20,7 +20,7 @@ interface Run {
 /** Peak memory is what the process itself reports at its end, so that no other tool is needed. */
 function measured(arguments_: readonly string[]): Run {
   const report =
-    'process.on("exit", () => process.stderr.write("\nPEAK " + process.resourceUsage().maxRSS + "\n"))';
+    'process.on("exit", () => process.stderr.write("\\nPEAK " + process.resourceUsage().maxRSS + "\\n"))';
   const start = process.hrtime.bigint();
   const { stderr } = spawnSync(
     process.execPath,

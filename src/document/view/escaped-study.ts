@@ -14,7 +14,6 @@ const NOT_PRINTED = new Set([
   'method',
   'references',
   'aim',
-  'inputs',
   'effectKeys',
 ]);
 

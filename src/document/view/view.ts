@@ -6,6 +6,7 @@ import { overallLoss, proportionsOf } from '../../plan/losses.ts';
 import { drivesSize } from '../../plan/plan.ts';
 import type { FullReport } from '../../report.ts';
 import type { DocumentKind, Study } from '../../spec/study.ts';
+import { escapeMarkdown } from '../markdown/escape.ts';
 import { formatCount, formatExact, formatPercent } from '../numbers.ts';
 import { type AimView, aimView } from './aim-view.ts';
 import { escapedStudy } from './escaped-study.ts';
@@ -33,9 +34,9 @@ export function kindWords(kind: DocumentKind) {
 }
 
 /** What all documents of a study may print. */
-export function buildView(report: FullReport) {
-  const { plan, judgements } = report;
-  const study = escapedStudy(report.study);
+export function buildView(given: FullReport) {
+  const report = withWords(given);
+  const { plan, judgements, study } = report;
   const common = {
     unit: study.sample.unit,
     counts: study.sample.counts,
@@ -80,11 +81,30 @@ export function buildView(report: FullReport) {
       rule,
       level,
       aim,
-      message,
-      acknowledged,
+      message: escapeMarkdown(message),
+      acknowledged: acknowledged === null ? null : escapeMarkdown(acknowledged),
     })),
     pointsToAppendix: study.documents.some((document) => document.kind === 'appendix'),
     software: { name: 'Samplecase', version, hash: study.hash, shortHash: study.hash.slice(0, 12) },
+  };
+}
+
+/** The report with every text of its author escaped, in the aims of the plan as well. */
+function withWords(report: FullReport): FullReport {
+  const study = escapedStudy(report.study);
+  const escapedAim = <Plan extends { aim: { index: number } }>(plan: Plan): Plan => ({
+    ...plan,
+    aim: study.aims[plan.aim.index] ?? plan.aim,
+  });
+  return {
+    ...report,
+    study,
+    plan: {
+      ...report.plan,
+      aims: report.plan.aims.map(escapedAim),
+      drivenBy: report.plan.drivenBy && escapedAim(report.plan.drivenBy),
+    },
+    sensitivities: report.sensitivities.map((one) => ({ ...one, plan: escapedAim(one.plan) })),
   };
 }
 

@@ -23,7 +23,7 @@ export function fTestPower(alpha: number, df1: number, df2: number, noncentralit
   const half = noncentrality / 2;
   // From weight 0 upwards as long as that weight is a number of ordinary size.
   if (half < FROM_ZERO) {
-    return fromAlpha(critical, alpha, df1 / 2, df2 / 2, Math.exp(-half), (j) => half / (j + 1));
+    return fromAlpha(critical, alpha, df1 / 2, df2 / 2, Math.exp(-half), () => half);
   }
   return beyond(critical, df1, df2, poissonWeights(half));
 }
@@ -40,8 +40,7 @@ export function sampledFTestPower(alpha: number, df1: number, df2: number, parti
   const size = (df1 + df2) / 2;
   const logFirst = size * Math.log1p(-partialR2);
   if (-logFirst < FROM_ZERO) {
-    const growth = (j: number) => ((size + j) / (j + 1)) * partialR2;
-    return fromAlpha(critical, alpha, df1 / 2, df2 / 2, Math.exp(logFirst), growth);
+    return fromAlpha(critical, alpha, df1 / 2, df2 / 2, Math.exp(logFirst), (j) => (size + j) * partialR2);
   }
   return beyond(critical, df1, df2, negativeBinomialWeights(size, partialR2));
 }
@@ -71,6 +70,7 @@ function criticalShare(alpha: number, df1: number, df2: number): Critical {
   return latest;
 }
 
+/** @param growth times 1/(j + 1): the ratio of weight j + 1 to weight j */
 function fromAlpha(
   { share: x, gain }: Critical,
   alpha: number,
@@ -85,12 +85,15 @@ function fromAlpha(
   let sum = 0;
   for (let j = 0; ; j += 1) {
     sum += weight * tail;
-    const next = growth(j);
+    const shape = a + j + 1;
+    // One division a term serves both recurrences.
+    const inverse = 1 / ((j + 1) * shape);
+    const next = growth(j) * shape * inverse;
     // The weights left fall faster than a geometric series, and no tail exceeds 1.
-    if (next < 1 && weight * next < (1 - next) * 1e-17 * sum) return sum;
+    if (next < 1 && weight * next < (1 - next) * 1e-16 * sum) return sum;
     weight *= next;
     tail += step;
-    step *= (x * (a + b + j)) / (a + j + 1);
+    step *= x * (a + b + j) * (j + 1) * inverse;
   }
 }
 

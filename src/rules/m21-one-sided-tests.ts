@@ -44,7 +44,6 @@ function laxInTrial({ aim }: AimPlan, { study }: StudyPlan): Part | null {
 function neededTwoSided(plan: AimPlan): number | null {
   const { aim, method, effect, target } = plan;
   if (aim.find !== 'sample-size' || effect === null || target === null) return null;
-  const twoSided = { ...aim, criteria: { ...aim.criteria, sides: 2 as const } };
-  const calculation = method.prepare(twoSided);
-  return requiredOrNull({ ...plan, aim: twoSided, calculation }, effect, target);
+  const calculation = method.prepare({ ...aim, criteria: { ...aim.criteria, sides: 2 } });
+  return requiredOrNull({ ...plan, calculation }, effect, target);
 }

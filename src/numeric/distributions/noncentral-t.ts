@@ -8,11 +8,12 @@
  *  other tails: all positive. Where the signs differ the series would alternate; the tail beyond t is then the
  *  integral of normal tails over the distribution of the standard deviation, whose integrand is positive. */
 
-import { requireBetween, requireFinite } from '../domain.ts';
+import { requireBetween, requireFinite, requireProbability } from '../domain.ts';
 import { mixtureTail } from '../mixtures/mixture-tail.ts';
 import { betaLadder } from '../mixtures/tail-ladder.ts';
 import { poissonWeights } from '../mixtures/weights.ts';
 import { integrate } from '../solve/quadrature.ts';
+import { findRoot } from '../solve/root.ts';
 import { betaPointOfProduct } from '../special/beta-point.ts';
 import { devianceTerm } from '../special/deviance.ts';
 import type { Tail } from '../special/direct-tail.ts';
@@ -34,6 +35,31 @@ export function noncentralTLowerTail(t: number, df: number, noncentrality: numbe
   if (noncentrality === 0) return tLowerTail(t, df);
   if (noncentrality < 0) return upperTail(-t, df, -noncentrality);
   return lowerTail(t, df, noncentrality);
+}
+
+/** The t with P(T ≤ t) = p, 0 < p < 1. */
+export function noncentralTQuantile(p: number, df: number, noncentrality: number): number {
+  check('noncentralTQuantile', 0, df, noncentrality);
+  requireProbability('noncentralTQuantile', 'p', p);
+  // The smaller of the two tails decides, so that neither end of the axis loses digits.
+  const side = p <= 0.5 ? noncentralTLowerTail : noncentralTUpperTail;
+  const goal = Math.log(Math.min(p, 1 - p));
+  const miss = (t: number) => Math.log(Math.max(side(t, df, noncentrality), Number.MIN_VALUE)) - goal;
+  const above = miss(noncentrality) > 0;
+  // Each tail grows towards the other's end.
+  let step = above === p <= 0.5 ? -1 : 1;
+  let [from, to] = [noncentrality, noncentrality + step];
+  while (miss(to) > 0 === above) {
+    from = to;
+    step *= 2;
+    to += step;
+  }
+  return findRoot(miss, from, to);
+}
+
+/** The t with P(T > t) = p, 0 < p < 1. */
+export function noncentralTUpperQuantile(p: number, df: number, noncentrality: number): number {
+  return -noncentralTQuantile(p, df, -noncentrality);
 }
 
 function check(name: string, t: number, df: number, noncentrality: number): void {

@@ -126,6 +126,15 @@ describe('write', () => {
     expect(page).toContain('**235**');
   });
 
+  test('a spec that asks for no document is told so', () => {
+    const { documents: _, ...bare } = nestedSpec();
+    const { status, stderr } = run(['write', '-', '--out', 'none'], JSON.stringify(bare));
+    expect({ status, stderr }).toEqual({
+      status: 1,
+      stderr: '- asks for no document. Add documents, such as [{kind: ethics}, {kind: appendix}].\n',
+    });
+  });
+
   test('a broken template of a user is told by name', () => {
     mkdirSync(join(folder, 'broken/parts'), { recursive: true });
     writeFileSync(join(folder, 'broken/parts/caution.hbs'), '{{#if}');

@@ -5,6 +5,7 @@ import { Command } from 'commander';
 import { readTemplates } from '../../files/read-templates.ts';
 import { writeWhole } from '../../files/write-whole.ts';
 import { renderAll } from '../../index.ts';
+import { EXIT, Exit } from '../exit.ts';
 import { ALLOW_OUTSIDE, exitIfInfeasible, planOrExit, readSpec, type SourceOptions } from '../spec-source.ts';
 
 interface WriteOptions extends SourceOptions {
@@ -21,6 +22,12 @@ export function writeCommand(): Command {
     .option(...ALLOW_OUTSIDE)
     .action(async (path: string, options: WriteOptions) => {
       const checked = planOrExit(readSpec(path, options));
+      if (checked.report.study.documents.length === 0) {
+        process.stderr.write(
+          `${path} asks for no document. Add documents, such as [{kind: ethics}, {kind: appendix}].\n`,
+        );
+        throw new Exit(EXIT.spec);
+      }
       const templates = options.templates === undefined ? {} : await ownTemplates(options.templates);
       const documents = renderAll(checked.report, templates);
       const files = documents.flatMap(({ files: ofDocument }) => ofDocument);

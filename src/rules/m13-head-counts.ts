@@ -4,7 +4,7 @@ import { type Part, together } from './support/findings.ts';
 import { mention, notesOf, purposeOf } from './support/texts.ts';
 
 const HEAD_COUNT =
-  /\b\d+ (?:people|participants|subjects|cases|observations|events)? ?per (?:variable|predictor|covariate|group)\b|\b50 ?\+ ?8|\b104 ?\+|\brule of thumb\b/i;
+  /\b(?:\d+|ten|fifteen|twenty|thirty) (?:people|participants|patients|persons|subjects|cases|observations|events)? ?(?:per|for each|for every) (?:candidate )?(?:variable|predictor|parameter|covariate|group)\b|\b50 ?\+ ?8|\b104 ?\+|\brules? of thumb\b/i;
 
 export const headCounts: Rule = {
   id: 'M13',

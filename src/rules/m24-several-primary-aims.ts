@@ -1,4 +1,4 @@
-import type { StudyPlan } from '../plan/plan.ts';
+import type { AimPlan, StudyPlan } from '../plan/plan.ts';
 import type { Rule } from './rule.ts';
 import { isTest } from './support/aim.ts';
 import { type Part, together } from './support/findings.ts';
@@ -6,6 +6,8 @@ import { shownPower } from './support/numbers.ts';
 import { inView } from './support/plan.ts';
 
 const USUAL_ALPHA = 0.05;
+/** A third of .05 is written .0167 or .017: each level may be rounded to its third decimal. */
+const ROUNDING = 0.0005;
 
 export const severalPrimaryAims: Rule = {
   id: 'M24',
@@ -22,6 +24,15 @@ function primaryTests({ aims }: StudyPlan) {
   return aims.filter(({ aim }) => aim.role === 'primary' && isTest(aim));
 }
 
+function totalAlpha(tests: readonly AimPlan[]): number {
+  return tests.reduce((sum, { aim }) => sum + aim.criteria.alpha, 0);
+}
+
+/** Whether an excess may come from rounding each of the levels. */
+function isWithin(excess: number, tests: number): boolean {
+  return excess <= tests * ROUNDING + 1e-12;
+}
+
 function unstated(plan: StudyPlan): Part | null {
   const tests = primaryTests(plan);
   if (tests.length < 2 || plan.study.primaryAims !== null) return null;
@@ -34,8 +45,9 @@ function unstated(plan: StudyPlan): Part | null {
 
 function undivided(plan: StudyPlan): Part | null {
   const tests = primaryTests(plan);
-  const total = tests.reduce((sum, { aim }) => sum + aim.criteria.alpha, 0);
-  if (tests.length < 2 || plan.study.primaryAims !== 'any' || total <= USUAL_ALPHA + 1e-12) return null;
+  const total = totalAlpha(tests);
+  if (tests.length < 2 || plan.study.primaryAims !== 'any' || isWithin(total - USUAL_ALPHA, tests.length))
+    return null;
   return {
     path: 'primary_aims',
     level: 'error',
@@ -45,9 +57,7 @@ function undivided(plan: StudyPlan): Part | null {
 
 function needlesslyDivided(plan: StudyPlan): Part | null {
   const tests = primaryTests(plan);
-  const isDivided = tests.every(
-    ({ aim }) => Math.abs(aim.criteria.alpha * tests.length - USUAL_ALPHA) < 1e-9,
-  );
+  const isDivided = isWithin(Math.abs(totalAlpha(tests) - USUAL_ALPHA), tests.length);
   if (tests.length < 2 || plan.study.primaryAims !== 'all' || !isDivided) return null;
   return {
     path: 'primary_aims',

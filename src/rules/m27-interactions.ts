@@ -4,7 +4,9 @@ import { isInteraction, isTest } from './support/aim.ts';
 import { type Part, together } from './support/findings.ts';
 import { mention, purposeOf } from './support/texts.ts';
 
-const DIFFERENCE = /\b(?:moderat\w+|sub-?group\w*|interact\w+|effect modif\w+|differs? between)\b/i;
+/** "A moderate effect" and "an interactive course" speak of no difference. */
+const DIFFERENCE =
+  /\b(?:moderat(?:ors?|es|ed|ing|ion)|moderate (?:the|this|that|these|its|their|how)|sub-?groups?|interact(?:s|ed|ing|ions?)?|effect modif\w+|differs? between)\b/i;
 
 export const interactions: Rule = {
   id: 'M27',

@@ -1,86 +1,36 @@
 import { describe, expect, test } from 'vitest';
 import { check, rules } from '../../src/index.ts';
 import { upperFactor } from '../../src/rules/m18-pilot-spread.ts';
-import { type NestedChanges, nestedSpec } from '../support/nested-spec.ts';
-
-type Spec = Record<string, unknown>;
-
-/** `RULE level` of everything found, and the messages by rule. */
-function judged(spec: Spec) {
-  const { problems } = check(spec);
-  return {
-    found: problems.map(({ code, level }) => `${code} ${level}`),
-    message: (rule: string) => problems.find(({ code }) => code === rule)?.message ?? '',
-  };
-}
-
-const nested = (changes: NestedChanges = {}) => nestedSpec(changes);
-
-/** One aim of another method in place of the nested one. */
-function aimOf(method: string, inputs: object, more: object = {}): Spec {
-  const spec = nestedSpec();
-  const [aim] = spec.aims as Spec[];
-  return {
-    ...spec,
-    aims: [{ ...aim, method, inputs, criteria: { alpha: 0.05, power: 0.9, sides: 2 }, ...more }],
-  };
-}
-
-const NOTE = 'An invented committee judged that less would not justify any change of practice.';
-const slope = (changes: object = {}) => ({
-  slope: { value: 1, low: 0.8, high: 1.4, basis: 'smallest-effect-of-interest', note: NOTE },
-  residual_sd: { value: 5, basis: 'routine-data', note: NOTE },
-  predictor_sd: { value: 1, basis: 'routine-data', note: NOTE },
-  predictor_r2: { value: 0.2, basis: 'expert-judgement', note: NOTE },
-  ...changes,
-});
-const coefficient = (changes: object = {}, more: object = {}) =>
-  aimOf('linear-coefficient', { adjusted_for: 3, predictor_values: 'sampled', effect: slope(changes) }, more);
-const interval = (criteria: object) =>
-  aimOf(
-    'linear-coefficient-precision',
-    { adjusted_for: 3, predictor_values: 'sampled', residual_sd: 5, predictor_sd: 1, predictor_r2: 0.2 },
-    { criteria },
-  );
-const quantity = (changes: object) => ({
-  value: 0.06,
-  basis: 'smallest-effect-of-interest',
-  note: NOTE,
-  ...changes,
-});
-const twoPrimary = (changes: Spec, criteria = { alpha: 0.05, power: 0.9 }) => {
-  const [first] = nestedSpec({ criteria }).aims as Spec[];
-  return { ...nestedSpec({ criteria, extraAims: [{ ...first, id: 'second' }] }), ...changes };
-};
-const withTerms = (parameters: number) => {
-  const spec = nestedSpec();
-  const [aim] = spec.aims as Spec[];
-  return { ...spec, aims: [{ ...aim, terms: { tested: [{ name: 'a factor', parameters }] } }] };
-};
-const losses = (...proportions: number[]) => ({
-  sample: { losses: proportions.map((proportion, index) => ({ stage: `stage ${index}`, proportion })) },
-});
-const aimText = (objective: string) => {
-  const spec = nestedSpec();
-  const [aim] = spec.aims as Spec[];
-  return { ...spec, aims: [{ ...aim, objective }] };
-};
+import { nestedSpec } from '../support/nested-spec.ts';
+import {
+  aimOf,
+  aimText,
+  coefficient,
+  interval,
+  judged,
+  losses,
+  NOTE,
+  quantity,
+  type Spec,
+  twoPrimary,
+  withTerms,
+} from '../support/study.ts';
 
 /** A spec that breaks the rule, and one just on the other side of its threshold. */
 const CASES: [finding: string, broken: Spec, kept: Spec][] = [
-  ['M01 warning', nested(losses(0.41)), nested(losses(0.4))],
-  ['M01 note', nested({ sample: {} }), nested(losses(0.1))],
-  ['M02 warning', nested(losses(0.1, 0.05, 0.15)), nested(losses(0.1, 0.05, 0.16))],
-  ['M02 note', nested(losses(0.1, 0.05)), nested(losses(0.1))],
+  ['M01 warning', nestedSpec(losses(0.41)), nestedSpec(losses(0.4))],
+  ['M01 note', nestedSpec({ sample: {} }), nestedSpec(losses(0.1))],
+  ['M02 warning', nestedSpec(losses(0.1, 0.05, 0.15)), nestedSpec(losses(0.1, 0.05, 0.16))],
+  ['M02 note', nestedSpec(losses(0.1, 0.05)), nestedSpec(losses(0.1))],
   [
     'M05 error',
-    nested({ criteria: { alpha: 0.5, power: 0.9 } }),
-    nested({ criteria: { alpha: 0.49, power: 0.9 } }),
+    nestedSpec({ criteria: { alpha: 0.5, power: 0.9 } }),
+    nestedSpec({ criteria: { alpha: 0.49, power: 0.9 } }),
   ],
-  ['M05 warning', nested({ find: 'power', evaluable: 18 }), nested({ find: 'power', evaluable: 19 })],
+  ['M05 warning', nestedSpec({ find: 'power', evaluable: 18 }), nestedSpec({ find: 'power', evaluable: 19 })],
   [
     'M08 note',
-    nested(),
+    nestedSpec(),
     aimOf(
       'linear-overall',
       { predictors: 3, effect: { r2: quantity({}) } },
@@ -94,13 +44,13 @@ const CASES: [finding: string, broken: Spec, kept: Spec][] = [
       { predictors: 3, effect: { r2: quantity({}) } },
       { criteria: { alpha: 0.05, power: 0.9 } },
     ),
-    nested(),
+    nestedSpec(),
   ],
-  ['M09 note', nested({ study: { design: 'Randomised experiment' } }), nested()],
+  ['M09 note', nestedSpec({ study: { design: 'Randomised experiment' } }), nestedSpec()],
   [
     'M10 warning',
-    nested({ partialR2: quantity({ basis: 'routine-data' }) }),
-    nested({
+    nestedSpec({ partialR2: quantity({ basis: 'routine-data' }) }),
+    nestedSpec({
       partialR2: quantity({
         basis: 'routine-data',
         note: 'The partial R² of the registry after it had been adjusted for eight predictors.',
@@ -111,25 +61,25 @@ const CASES: [finding: string, broken: Spec, kept: Spec][] = [
   ['M12 error', withTerms(2), withTerms(3)],
   [
     'M13 warning',
-    nested({
+    nestedSpec({
       partialR2: quantity({
         note: 'We planned with 10 people per predictor as the committee had asked for.',
       }),
     }),
-    nested(),
+    nestedSpec(),
   ],
   [
     'M14 warning',
-    nested({ partialR2: quantity({ value: 0.13, basis: 'convention' }) }),
-    nested({ partialR2: quantity({ value: 0.13 }) }),
+    nestedSpec({ partialR2: quantity({ value: 0.13, basis: 'convention' }) }),
+    nestedSpec({ partialR2: quantity({ value: 0.13 }) }),
   ],
-  ['M15 warning', nested({ partialR2: 0.06 }), nested({ sample: {} })],
+  ['M15 warning', nestedSpec({ partialR2: 0.06 }), nestedSpec({ sample: {} })],
   [
     'M16 warning',
-    nested({ partialR2: quantity({ basis: 'published-estimate', source: { n: 58, studies: 3 } }) }),
-    nested({ partialR2: quantity({ basis: 'published-estimate', source: { n: 59, studies: 3 } }) }),
+    nestedSpec({ partialR2: quantity({ basis: 'published-estimate', source: { n: 58, studies: 3 } }) }),
+    nestedSpec({ partialR2: quantity({ basis: 'published-estimate', source: { n: 59, studies: 3 } }) }),
   ],
-  ['M17 warning', nested({ partialR2: quantity({ basis: 'pilot-data' }) }), nested()],
+  ['M17 warning', nestedSpec({ partialR2: quantity({ basis: 'pilot-data' }) }), nestedSpec()],
   [
     'M18 warning',
     coefficient({ residual_sd: { value: 5, basis: 'pilot-data', note: NOTE, source: { n: 70 } } }),
@@ -140,7 +90,7 @@ const CASES: [finding: string, broken: Spec, kept: Spec][] = [
     aimText('To report the post hoc power of the finished study'),
     aimText('To report the estimate of the finished study'),
   ],
-  ['M20 note', nested({ find: 'detectable-effect', evaluable: 235 }), nested()],
+  ['M20 note', nestedSpec({ find: 'detectable-effect', evaluable: 235 }), nestedSpec()],
   [
     'M21 warning',
     coefficient({}, { criteria: { alpha: 0.05, power: 0.9, sides: 1 } }),
@@ -156,8 +106,12 @@ const CASES: [finding: string, broken: Spec, kept: Spec][] = [
       },
     ),
   ],
-  ['M23 warning', nested({ find: 'power', evaluable: 60 }), nested({ find: 'power', evaluable: 200 })],
-  ['M23 note', nested({ criteria: { alpha: 0.04, power: 0.9 } }), nested()],
+  [
+    'M23 warning',
+    nestedSpec({ find: 'power', evaluable: 60 }),
+    nestedSpec({ find: 'power', evaluable: 200 }),
+  ],
+  ['M23 note', nestedSpec({ criteria: { alpha: 0.04, power: 0.9 } }), nestedSpec()],
   ['M24 error', twoPrimary({}), twoPrimary({ primary_aims: 'all' })],
   [
     'M24 error',
@@ -169,7 +123,7 @@ const CASES: [finding: string, broken: Spec, kept: Spec][] = [
     twoPrimary({ primary_aims: 'all' }, { alpha: 0.025, power: 0.9 }),
     twoPrimary({ primary_aims: 'all' }),
   ],
-  ['M27 warning', aimText('To learn whether the effect differs between the two subgroups'), nested()],
+  ['M27 warning', aimText('To learn whether the effect differs between the two subgroups'), nestedSpec()],
   [
     'M31 note',
     interval({ confidence: 0.95, width: 2 }),
@@ -194,8 +148,8 @@ const CASES: [finding: string, broken: Spec, kept: Spec][] = [
   ],
   [
     'M52 error',
-    nested({ sample: { missing_data: 'Missing outcomes are imputed.' } }),
-    nested({
+    nestedSpec({ sample: { missing_data: 'Missing outcomes are imputed.' } }),
+    nestedSpec({
       sample: {
         missing_data: 'Missing outcomes are imputed.',
         losses: [{ stage: 'drops out', proportion: 0.1 }],
@@ -204,10 +158,14 @@ const CASES: [finding: string, broken: Spec, kept: Spec][] = [
   ],
   [
     'M54 warning',
-    nested({ sample: { recruitment: { eligible_per_month: 23, months: 10 } } }),
-    nested({ sample: { recruitment: { eligible_per_month: 24, months: 10 } } }),
+    nestedSpec({ sample: { recruitment: { eligible_per_month: 23, months: 10 } } }),
+    nestedSpec({ sample: { recruitment: { eligible_per_month: 24, months: 10 } } }),
   ],
-  ['M54 note', nested({ documents: [{ kind: 'grant' }] }), nested({ documents: [{ kind: 'ethics' }] })],
+  [
+    'M54 note',
+    nestedSpec({ documents: [{ kind: 'grant' }] }),
+    nestedSpec({ documents: [{ kind: 'ethics' }] }),
+  ],
 ];
 
 describe('each rule on both sides of its threshold', () => {
@@ -224,21 +182,21 @@ describe('what the messages say', () => {
   test.each([
     [
       'M02',
-      nested(losses(0.1, 0.1)),
+      nestedSpec(losses(0.1, 0.1)),
       'The 2 stages together lose 19 %, not the 20 % of their sum, because each acts on those whom the stages before it left.',
     ],
     [
       'M08',
-      nested({ predictorValues: 'fixed' }),
+      nestedSpec({ predictorValues: 'fixed' }),
       'Noncentrality is taken as f²·n. Under the older convention f²·(u + v + 1), with fixed predictors, 231 would have to be analysed; the number here is 227.',
     ],
     [
       'M09',
       {
-        ...nested(),
+        ...nestedSpec(),
         aims: [
           {
-            ...(nested().aims as Spec[])[0],
+            ...(nestedSpec().aims as Spec[])[0],
             inputs: { added: 3, adjusted_for: 5, effect: { partial_r2: quantity({}) } },
           },
         ],
@@ -261,8 +219,38 @@ describe('what the messages say', () => {
       'There are 2 primary tests, and it is not stated whether the study succeeds only if all do or if any does. State primary_aims: all or any.',
     ],
     [
+      'M02',
+      nestedSpec(losses(0.1, 0.05, 0.15)),
+      'The loss at “stage 2” (15 %) is the sum of the other stages, so the same people seem to be lost twice. Leave out the total, or the parts. The 3 stages together lose 27.3 %, not the 30 % of their sum, because each acts on those whom the stages before it left.',
+    ],
+    [
+      'M14',
+      nestedSpec({ partialR2: quantity({ value: 0.13, basis: 'convention' }) }),
+      'The partial R² (.13) is one of the conventional size labels and has no other basis. Say what it means in units of the outcome, and who needs to find an effect of that size and why.',
+    ],
+    [
+      'M17',
+      nestedSpec({ partialR2: quantity({ basis: 'pilot-data' }) }),
+      'The partial R² (.06) is taken from pilot data. Plan for the smallest effect that would matter, and use the pilot for spread and losses.',
+    ],
+    [
+      'M18',
+      coefficient({ residual_sd: { value: 5, basis: 'pilot-data', note: NOTE, source: { n: 12 } } }),
+      'The residual standard deviation comes from 12 people. At its upper one-sided 80 % limit, 6.27, 526 instead of 337 would have to be analysed. Plan with a larger value, or answer why this one is trusted.',
+    ],
+    [
+      'M24',
+      twoPrimary({ primary_aims: 'any' }),
+      'Any of 2 primary tests may count as success, and their significance levels add up to .100. Divide .050 among them and state the divided level as alpha of each.',
+    ],
+    [
+      'M31',
+      interval({ confidence: 0.95, width: 2 }),
+      'The expected width is planned, so about half of such studies end with a wider interval. Add assurance: .80 to plan for a width that four in five studies keep, which needs 145 analysed instead of 128.',
+    ],
+    [
       'M52',
-      nested({ sample: { missing_data: 'Missing outcomes are imputed.' } }),
+      nestedSpec({ sample: { missing_data: 'Missing outcomes are imputed.' } }),
       '“imputed” is planned and no loss is allowed for. Imputation does not replace missing outcomes: state the losses that are expected.',
     ],
   ] as [string, Spec, string][])('%s', (rule, spec, message) => {
@@ -270,7 +258,7 @@ describe('what the messages say', () => {
   });
 
   test('a bare number is allowed, and reported as having no basis stated', () => {
-    const { found, message } = judged(nested({ partialR2: 0.06 }));
+    const { found, message } = judged(nestedSpec({ partialR2: 0.06 }));
     expect(found.filter((one) => one.endsWith('error'))).toEqual([]);
     expect(message('M15')).toContain('no basis stated');
   });
@@ -296,7 +284,7 @@ describe('check values', () => {
 
 describe('answers', () => {
   const answered = (rule: string, reason: string) => ({
-    ...nested({ partialR2: quantity({ basis: 'pilot-data' }) }),
+    ...nestedSpec({ partialR2: quantity({ basis: 'pilot-data' }) }),
     acknowledge: [{ rule, reason }],
   });
 
@@ -337,6 +325,6 @@ describe('the list of rules', () => {
 
   test('M50: an aim of prediction is not sized by a test', () => {
     expect(judged(aimText('To develop a prediction model for the outcome')).found.join()).toMatch(/M50/);
-    expect(judged(nested()).found.join()).not.toMatch(/M50/);
+    expect(judged(nestedSpec()).found.join()).not.toMatch(/M50/);
   });
 });
